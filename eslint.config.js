@@ -40,6 +40,7 @@ export default tseslint.config(
         setInterval: 'readonly',
         clearInterval: 'readonly',
         URL: 'readonly',
+        fetch: 'readonly',
       },
     },
   },

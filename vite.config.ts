@@ -4,7 +4,7 @@ import tailwindcss from '@tailwindcss/vite';
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
-  build: { outDir: 'dist/client', emptyOutDir: true, target: 'es2022', assetsInlineLimit: 0 },
+  build: { outDir: 'dist/client', emptyOutDir: true, manifest: true, target: 'es2022', assetsInlineLimit: 0 },
   worker: { format: 'es' },
   test: {
     projects: [
