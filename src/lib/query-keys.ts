@@ -1,0 +1,12 @@
+import type { ProblemAddress } from './problem/problem-address.ts';
+
+/** One place for the keys of server data, so that an event can name what has become old. */
+export const queryKeys = {
+  session: ['session'] as const,
+  health: ['health'] as const,
+  team: (team: string) => ['team', team] as const,
+  problems: (team: string) => ['team', team, 'problems'] as const,
+  problem: ({ team, number }: ProblemAddress) => ['team', team, 'problem', number] as const,
+  evidence: ({ team, number }: ProblemAddress) => ['team', team, 'problem', number, 'evidence'] as const,
+  report: ({ team, number }: ProblemAddress) => ['team', team, 'problem', number, 'report'] as const,
+};

@@ -1,0 +1,38 @@
+import { queryOptions, useQuery } from '@tanstack/react-query';
+import type { Role, Session } from '#shared/contracts/session.ts';
+import { ApiError } from '#src/lib/api/api-error.ts';
+import { getSession } from '#src/lib/api/boot-endpoints.ts';
+import { call } from '#src/lib/api/call.ts';
+import { queryKeys } from '#src/lib/query-keys.ts';
+import { rememberSession } from './sign-in-again.ts';
+
+/** Who is signed in; null when nobody is. */
+export const sessionQuery = queryOptions({
+  queryKey: queryKeys.session,
+  staleTime: 5 * 60_000,
+  queryFn: async ({ signal }): Promise<Session | null> => {
+    try {
+      const session = await call(getSession, { signal, mayBeSignedOut: true });
+      keepSession(session);
+      return session;
+    } catch (error) {
+      if (error instanceof ApiError && error.status === 401) return null;
+      throw error;
+    }
+  },
+});
+
+export function keepSession(session: Session | null): void {
+  rememberSession(session && { userId: session.user.id, email: session.user.email, name: session.user.name });
+}
+
+/** The session of a screen that is shown only to who is signed in. */
+export function useSession(): Session {
+  const { data } = useQuery(sessionQuery);
+  if (!data) throw new Error('useSession: needs somebody to be signed in');
+  return data;
+}
+
+export function roleIn(session: Session, team: string): Role | null {
+  return session.teams.find(({ slug }) => slug === team)?.role ?? null;
+}

@@ -1,0 +1,4 @@
+import { expose } from 'comlink';
+import { createFindingsEngine } from '#src/lib/findings/findings-engine.ts';
+
+expose(createFindingsEngine());
