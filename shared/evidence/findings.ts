@@ -3,7 +3,7 @@
  * between threads; all values in coherent SI unless a field says otherwise. Nothing here is ever stored as
  * truth: only an edition keeps findings, frozen beside their evidence.
  */
-import type { Reading } from './evidence.ts';
+import type { Reading, ValueReference } from './evidence.ts';
 
 /** Signed contribution of one independent source to a value, in the value's SI unit. */
 export interface Part {
@@ -39,8 +39,12 @@ export interface Column {
   readonly own: Float64Array;
   /** Sensitivity to each shared source, length n each. */
   readonly shared: readonly { readonly source: string; readonly c: Float64Array }[];
+  /** Share of `own` that the scatter of repeats does not contain, length n; absent when there is none. */
+  readonly apart?: Float64Array | undefined;
   readonly unit: string;
   readonly hue: Hue;
+  /** Trials that could not be read, each in one sentence; their value is NaN. */
+  readonly warnings: readonly string[];
 }
 
 /** What stands in the place of a value that cannot be had. The sentence says what to mend and where. */
@@ -88,9 +92,20 @@ export type MadeOf =
       readonly scatterKind: 'group' | 'pooled' | 'instrument';
     }
   | { readonly kind: 'summary'; readonly stat: string; readonly trials: readonly string[] }
-  | { readonly kind: 'expression'; readonly expr: string; readonly inputs: readonly string[] }
+  | {
+      readonly kind: 'expression';
+      readonly expr: string;
+      /** Keys of the inputs, and what they point at, in the same order. */
+      readonly inputs: readonly string[];
+      readonly refs: readonly ValueReference[];
+    }
   | { readonly kind: 'fit'; readonly comparison: string }
-  | { readonly kind: 'difference'; readonly a: string; readonly b: string }
+  | {
+      readonly kind: 'difference';
+      readonly a: string;
+      readonly b: string;
+      readonly refs: readonly [ValueReference, ValueReference];
+    }
   | { readonly kind: 'count'; readonly trials: readonly string[] };
 
 /** An independent source of uncertainty, in words for budgets and cards. */
