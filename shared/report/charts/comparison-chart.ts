@@ -1,10 +1,16 @@
-import type { ChartConfiguration } from 'chart.js';
 import type { Evidence, ProblemSettings } from '#shared/evidence/evidence.ts';
 import type { ChartFinding } from '#shared/evidence/findings.ts';
-import type { ChartSize, ChartTheme } from './chart-theme.ts';
-
-/** A chart of ours: lines, points and the bars of the residual strip over linear axes. */
-export type ComparisonChart = ChartConfiguration<'scatter' | 'line' | 'bar'>;
+import { axisTitles } from './axis-titles.ts';
+import { comparisonScales, TOP } from './chart-scales.ts';
+import { NARROW_BELOW, type ChartSize, type ChartTheme } from './chart-theme.ts';
+import type { ComparisonChart } from './comparison-chart-types.ts';
+import { comparisonDatasets } from './comparison-datasets.ts';
+import { comparisonScene } from './comparison-scene.ts';
+import { curveLabels } from './curve-labels.ts';
+import { errorBars } from './error-bars.ts';
+import { excludedMarks } from './excluded-marks.ts';
+import { largestMark } from './largest-mark.ts';
+import { residualStrip } from './residual-strip.ts';
 
 /**
  * The Chart.js configuration of a comparison: measured points against the predicted curve, residuals below.
@@ -12,13 +18,38 @@ export type ComparisonChart = ChartConfiguration<'scatter' | 'line' | 'bar'>;
  *
  * @param finding - the chart's finding, without a fault
  * @param size - size of the drawing area in CSS pixels; it decides between the wide and the narrow form
+ * @throws RangeError when an axis' quantity or its unit is not in the register: such a chart has a fault and is not drawn
  */
 export function comparisonChart(
-  _finding: ChartFinding,
-  _evidence: Evidence,
-  _settings: ProblemSettings,
-  _theme: ChartTheme,
-  _size: ChartSize,
+  finding: ChartFinding,
+  evidence: Evidence,
+  settings: ProblemSettings,
+  theme: ChartTheme,
+  size: ChartSize,
 ): ComparisonChart {
-  throw new Error('comparisonChart: not filled in yet');
+  const scene = comparisonScene(finding, evidence, settings);
+  const narrow = size.width < NARROW_BELOW;
+  const datasets = comparisonDatasets(scene, theme);
+  const barIndex = datasets.findIndex((dataset) => dataset.label === 'residuals');
+  return {
+    type: 'scatter',
+    data: { datasets },
+    options: {
+      responsive: false,
+      maintainAspectRatio: false,
+      animation: false,
+      interaction: { mode: 'nearest', intersect: true },
+      layout: { padding: { top: TOP, right: 4, bottom: 0, left: 0 } },
+      plugins: { legend: { display: false }, tooltip: { enabled: false }, filler: { propagate: false } },
+      scales: comparisonScales(scene, theme, size),
+    },
+    plugins: [
+      largestMark(scene, theme),
+      errorBars(scene, theme),
+      excludedMarks(scene, theme),
+      residualStrip(scene, theme, narrow, barIndex),
+      axisTitles(scene, theme),
+      ...(narrow ? [] : [curveLabels(scene, theme)]),
+    ],
+  };
 }
