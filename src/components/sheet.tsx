@@ -1,0 +1,39 @@
+import { Dialog as Radix } from 'radix-ui';
+import type { ReactNode } from 'react';
+import { Button } from './button.tsx';
+
+interface SheetProps {
+  readonly open: boolean;
+  readonly onClose: () => void;
+  readonly title: string;
+  /** The title is for screen readers alone. */
+  readonly isTitleHidden?: boolean;
+  readonly children: ReactNode;
+}
+
+/** From the bottom of a small screen: the stations, a provenance card. */
+export function Sheet({ open, onClose, title, isTitleHidden = false, children }: SheetProps) {
+  return (
+    <Radix.Root open={open} onOpenChange={(isOpen) => !isOpen && onClose()}>
+      <Radix.Portal>
+        <Radix.Overlay className="fixed inset-0 z-20 bg-ink/25 dark:bg-desk/70" />
+        <Radix.Content
+          aria-describedby={undefined}
+          className="slides-up fixed inset-x-0 bottom-0 z-20 max-h-[85dvh] overflow-y-auto rounded-t-lg bg-paper px-5 pt-4 pb-[max(20px,env(safe-area-inset-bottom))] shadow-card"
+        >
+          <div className="flex items-center justify-between gap-4">
+            <Radix.Title className={isTitleHidden ? 'sr-only' : 'font-report text-[21px]/7 font-medium'}>
+              {title}
+            </Radix.Title>
+            <Radix.Close asChild>
+              <Button kind="plain" className="-mr-2 ml-auto min-h-12">
+                Close
+              </Button>
+            </Radix.Close>
+          </div>
+          {children}
+        </Radix.Content>
+      </Radix.Portal>
+    </Radix.Root>
+  );
+}
