@@ -23,6 +23,15 @@ export default tseslint.config(
     rules: {
       ...reactHooks.configs.recommended.rules,
       ...jsxA11y.configs.recommended.rules,
+      // A frame that scrolls must be reachable by keyboard, and may answer keys; it never answers the pointer.
+      'jsx-a11y-x/no-noninteractive-tabindex': [
+        'error',
+        { roles: ['region', 'group', 'tabpanel'], tags: [] },
+      ],
+      'jsx-a11y-x/no-noninteractive-element-interactions': [
+        'error',
+        { handlers: ['onClick', 'onMouseDown', 'onMouseUp'] },
+      ],
     },
   },
   {
