@@ -133,3 +133,12 @@ export const updateProblem = endpoint({
   status: 200,
   answer: problemSchema,
 });
+
+/** Captain only; 404 for who is not of the team, 409 `last-captain`. Open sockets of that person end. */
+export const changeRole = endpoint({
+  method: 'PATCH',
+  path: '/api/teams/:team/members/:person',
+  body: z.object({ role: roleSchema }),
+  status: 200,
+  answer: personSchema,
+});

@@ -1,0 +1,55 @@
+import { Piscina } from 'piscina';
+import type { Evidence } from '#shared/evidence/evidence.ts';
+import type { Findings } from '#shared/evidence/findings.ts';
+import { workerFile } from '#server/config/worker-file.ts';
+import type { EvaluationTask } from './evaluation-worker.ts';
+
+export interface Evaluation {
+  /** Findings of a problem's evidence. Asked twice for the same version, computed once. */
+  getFindings(problemId: string, evidence: Evidence): Promise<Findings>;
+  close(): Promise<void>;
+}
+
+interface Held {
+  readonly version: number;
+  readonly findings: Promise<Findings>;
+}
+
+const MAX_HELD = 40;
+
+/** evaluate() in worker threads, so that a long evaluation never holds up a request. Threads start when first needed. */
+export function createEvaluation(): Evaluation {
+  const held = new Map<string, Held>();
+  let pool: Piscina | null = null;
+
+  const compute = (task: EvaluationTask): Promise<Findings> => {
+    pool ??= new Piscina({
+      ...workerFile(import.meta.url, 'evaluation/evaluation-worker.ts'),
+      name: 'evaluateInWorker',
+      minThreads: 0,
+      maxThreads: 2,
+      idleTimeout: 60_000,
+    });
+    return pool.run(task) as Promise<Findings>;
+  };
+
+  return {
+    getFindings(problemId, evidence) {
+      const before = held.get(problemId);
+      if (before?.version === evidence.version) return before.findings;
+      const findings = compute({ problemId, evidence });
+      const entry = { version: evidence.version, findings };
+      held.delete(problemId);
+      held.set(problemId, entry);
+      if (held.size > MAX_HELD) held.delete(held.keys().next().value ?? problemId);
+      // A failure is not kept: the next request tries again.
+      findings.catch(() => {
+        if (held.get(problemId) === entry) held.delete(problemId);
+      });
+      return findings;
+    },
+    async close() {
+      await pool?.close();
+    },
+  };
+}

@@ -1,0 +1,15 @@
+import type { Express } from 'express';
+import { changeRole as changeRoleEndpoint, getTeam as getTeamEndpoint } from '#shared/contracts/teams.ts';
+import type { ServerDeps } from '#server/deps.ts';
+import { mountTeam } from '#server/middleware/mount.ts';
+import { changeRole, getTeam } from './service.ts';
+
+export function mountTeams(app: Express, deps: ServerDeps): void {
+  mountTeam(app, deps.database, getTeamEndpoint, 'read', ({ place }) => getTeam(deps.database, place));
+
+  mountTeam(app, deps.database, changeRoleEndpoint, 'captain', async ({ place, actor, body, param }) => {
+    const person = await changeRole(deps, place, { by: actor.id, person: param('person'), role: body.role });
+    deps.events.publishStale(place, 'team');
+    return person;
+  });
+}

@@ -1,0 +1,56 @@
+import { rateLimit } from 'express-rate-limit';
+import type { Request, RequestHandler } from 'express';
+import { AppError } from '#server/errors/app-error.ts';
+
+/** How many may be tried within `minutes`. */
+export interface Limits {
+  readonly minutes: number;
+  /** Failed sign-ins from one address: a whole team may sit behind it. */
+  readonly failuresPerAddress: number;
+  /** Failed sign-ins for one account, wherever they come from. */
+  readonly failuresPerAccount: number;
+}
+
+export const DEFAULT_LIMITS: Limits = { minutes: 15, failuresPerAddress: 60, failuresPerAccount: 10 };
+
+/** Slows down guessing: 429 `too-many-attempts`. Successful sign-ins do not count. */
+export function signInLimits(limits: Limits): RequestHandler[] {
+  return [
+    failureLimit(limits.minutes, limits.failuresPerAddress, undefined),
+    failureLimit(limits.minutes, limits.failuresPerAccount, accountOf),
+  ];
+}
+
+/** The same for the passphrase asked for when it is changed. */
+export function passphraseLimits(limits: Limits): RequestHandler[] {
+  return [failureLimit(limits.minutes, limits.failuresPerAccount, (request) => request.user?.id ?? 'nobody')];
+}
+
+function failureLimit(
+  minutes: number,
+  limit: number,
+  keyGenerator: ((request: Request) => string) | undefined,
+): RequestHandler {
+  return rateLimit({
+    windowMs: minutes * 60_000,
+    limit,
+    skipSuccessfulRequests: true,
+    standardHeaders: 'draft-7',
+    legacyHeaders: false,
+    ...(keyGenerator ? { keyGenerator } : {}),
+    handler: (_request, _response, next) =>
+      next(
+        new AppError(
+          429,
+          'too-many-attempts',
+          `This was tried too often. Wait ${minutes} minutes and try again.`,
+        ),
+      ),
+  });
+}
+
+function accountOf(request: Request): string {
+  const body: unknown = request.body;
+  const email = typeof body === 'object' && body !== null && 'email' in body ? body.email : '';
+  return typeof email === 'string' ? email.trim().toLowerCase() : '';
+}

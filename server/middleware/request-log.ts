@@ -1,0 +1,27 @@
+import type { RequestHandler } from 'express';
+import type { Logger } from 'pino';
+import { pinoHttp } from 'pino-http';
+
+/**
+ * One line for each answered request of the API: method, path, status, time. Never a header, a query or a body, for
+ * those carry cookies, tokens, passphrases and the team's work.
+ */
+export function requestLog(logger: Logger): RequestHandler {
+  return pinoHttp({
+    logger,
+    wrapSerializers: false,
+    genReqId: (request) => ('requestId' in request ? String(request.requestId) : ''),
+    autoLogging: { ignore: (request) => !(request.url ?? '').startsWith('/api/') },
+    customLogLevel: (_request, response, error) =>
+      error || response.statusCode >= 500 ? 'error' : response.statusCode >= 400 ? 'warn' : 'info',
+    serializers: {
+      req: (request: { id: unknown; method: string; url: string; originalUrl?: string }) => ({
+        id: request.id,
+        method: request.method,
+        path: (request.originalUrl ?? request.url).split('?')[0],
+      }),
+      res: (response: { statusCode: number }) => ({ status: response.statusCode }),
+      err: (error: { type?: string }) => ({ type: error.type ?? 'Error' }),
+    },
+  });
+}

@@ -1,0 +1,126 @@
+import { createServer } from 'node:http';
+import type { Server } from 'node:http';
+import { mkdir } from 'node:fs/promises';
+import type { AddressInfo } from 'node:net';
+import path from 'node:path';
+import type { Express } from 'express';
+import type { Logger } from 'pino';
+import { createApp } from './app.ts';
+import { serveBuiltClient, serveLiveClient } from './client.ts';
+import type { ServedClient } from './client.ts';
+import type { Environment } from './config/environment.ts';
+import { getSessionSecret } from './config/session-secret.ts';
+import { databaseFile } from './database/database-file.ts';
+import { openDatabase } from './database/database.ts';
+import { createMigrator } from './database/migrator.ts';
+import { seedDemo } from './database/seeders/demo/seed-demo.ts';
+import type { ServerDeps } from './deps.ts';
+import { createEvaluation } from './evaluation/evaluation.ts';
+import { attachEventStream } from './features/events/event-stream.ts';
+import { EventHub } from './features/events/service.ts';
+import { createEvidenceCache } from './features/evidence/service.ts';
+import { createSessionLayer } from './features/session/session-layer.ts';
+import { clearExpiredSessions } from './features/session/service.ts';
+import { createCsrf } from './middleware/csrf.ts';
+import { DEFAULT_LIMITS } from './middleware/rate-limits.ts';
+import type { Limits } from './middleware/rate-limits.ts';
+import { OpenSockets } from './sockets/open-sockets.ts';
+import { attachSocketUpgrades } from './sockets/socket-upgrades.ts';
+
+export interface ServerOptions {
+  readonly environment: Environment;
+  readonly logger: Logger;
+  readonly now: () => Date;
+  readonly limits?: Limits;
+}
+
+export interface RunningServer {
+  readonly url: string;
+  readonly app: Express;
+  readonly deps: ServerDeps;
+  /** Tells open tabs that it restarts, finishes what is under way, and closes everything. */
+  close(): Promise<void>;
+}
+
+/** Opens the data folder, brings the database up to date, loads the demonstration once, and listens. */
+export async function startServer(options: ServerOptions): Promise<RunningServer> {
+  const { environment } = options;
+  await mkdir(environment.dataFolder, { recursive: true });
+  const server = createServer();
+  const client = await createClient(environment, server);
+  const deps = await createDeps(options, client);
+  const app = createApp(deps);
+  server.on('request', app);
+  const upgrades = attachSocketUpgrades(server, { ...deps, findActor: deps.session.findActor });
+  attachEventStream(upgrades, deps);
+  const port = await listen(server, environment);
+  return {
+    url: `http://${environment.host.includes(':') ? `[${environment.host}]` : environment.host}:${port}`,
+    app,
+    deps,
+    close: () => closeAll(server, client, deps),
+  };
+}
+
+async function createDeps(
+  { environment, logger, now, limits }: ServerOptions,
+  client: ServedClient | null,
+): Promise<ServerDeps> {
+  const secret = await getSessionSecret(environment.dataFolder);
+  const database = openDatabase(databaseFile(environment.dataFolder));
+  await createMigrator(database).up();
+  if (environment.demo) await seedDemo(database, now());
+  await clearExpiredSessions(database, now());
+  return {
+    environment,
+    database,
+    logger,
+    now,
+    session: createSessionLayer(database, secret),
+    csrf: createCsrf(secret),
+    limits: limits ?? DEFAULT_LIMITS,
+    sockets: new OpenSockets(),
+    events: new EventHub(),
+    evidenceCache: createEvidenceCache(),
+    evaluation: createEvaluation(),
+    client: client?.handler ?? null,
+  };
+}
+
+async function createClient(environment: Environment, server: Server): Promise<ServedClient | null> {
+  switch (environment.mode) {
+    case 'production':
+      return serveBuiltClient(path.resolve('dist/client'));
+    case 'development':
+      return serveLiveClient(server);
+    case 'test':
+      return null;
+  }
+}
+
+function listen(server: Server, { host, port }: Environment): Promise<number> {
+  return new Promise((resolve, reject) => {
+    server.once('error', reject);
+    server.listen(port, host, () => {
+      server.off('error', reject);
+      resolve((server.address() as AddressInfo).port);
+    });
+  });
+}
+
+const GRACE_MS = 1_000;
+
+async function closeAll(server: Server, client: ServedClient | null, deps: ServerDeps): Promise<void> {
+  const closed = new Promise<void>((resolve) => server.close(() => resolve()));
+  deps.sockets.closeAll();
+  server.closeIdleConnections();
+  const impatience = setTimeout(() => {
+    deps.sockets.terminateAll();
+    server.closeAllConnections();
+  }, GRACE_MS);
+  await closed;
+  clearTimeout(impatience);
+  await client?.close();
+  await deps.evaluation.close();
+  await deps.database.close();
+}
