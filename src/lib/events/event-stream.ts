@@ -24,6 +24,8 @@ export interface StreamSettings {
 
 const FIRST_PAUSE_MS = 500;
 const LONGEST_PAUSE_MS = 10_000;
+/** A connection that ends sooner was refused, not lost: the pause goes on growing. */
+const LASTING_MS = 2_000;
 
 /** One socket for each tab, connected again for as long as it is wanted. */
 export function createEventStream({ address, checkSession }: StreamSettings): EventStream {
@@ -35,6 +37,7 @@ export function createEventStream({ address, checkSession }: StreamSettings): Ev
   let timer: ReturnType<typeof setTimeout> | null = null;
   let pause = FIRST_PAUSE_MS;
   let hasBeenOpen = false;
+  let openedAt = 0;
   let isWanted = false;
 
   function connect(): void {
@@ -42,7 +45,7 @@ export function createEventStream({ address, checkSession }: StreamSettings): Ev
     const attempt = new WebSocket(address);
     socket = attempt;
     attempt.addEventListener('open', () => {
-      pause = FIRST_PAUSE_MS;
+      openedAt = performance.now();
       state.set('open');
       if (said) attempt.send(JSON.stringify(said));
       if (hasBeenOpen) for (const listener of [...returnListeners]) listener();
@@ -61,6 +64,8 @@ export function createEventStream({ address, checkSession }: StreamSettings): Ev
     socket = null;
     if (!isWanted) return;
     state.set('down');
+    if (openedAt > 0 && performance.now() - openedAt > LASTING_MS) pause = FIRST_PAUSE_MS;
+    openedAt = 0;
     await checkSession().catch(() => undefined);
     if (isWanted && !socket && timer === null) timer = setTimeout(connect, pause);
     pause = Math.min(pause * 2, LONGEST_PAUSE_MS);

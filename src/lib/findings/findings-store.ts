@@ -1,7 +1,8 @@
-import { findValue } from '#shared/evidence/find-value.ts';
 import type { Evidence, ValueReference } from '#shared/evidence/evidence.ts';
+import { findValue } from '#shared/evidence/find-value.ts';
 import type { Fault, Findings, Scalar } from '#shared/evidence/findings.ts';
 import type { EvidenceData } from '#src/lib/evidence/evidence-query.ts';
+import { createEvaluationQueue, type EvaluationQueue } from './evaluation-queue.ts';
 import { sameValue } from './same-value.ts';
 import type { RunningEngine } from './start-engine.ts';
 
@@ -11,6 +12,8 @@ export interface FindingsSnapshot {
   readonly findings: Findings;
 }
 
+type Value = Scalar | Fault | null;
+
 /** Findings of one open problem, outside React. */
 export interface FindingsStore {
   /** null until the first evaluation has ended. */
@@ -19,18 +22,20 @@ export interface FindingsStore {
   failure(): unknown;
   subscribe(listener: () => void): () => void;
   /** The value of a reference, or why there is none; null before the first findings. */
-  find(reference: ValueReference): Scalar | Fault | null;
+  find(reference: ValueReference): Value;
   /** Hears only when the value of this reference has become another one. */
-  subscribeTo(reference: ValueReference, listener: (value: Scalar | Fault | null) => void): () => void;
-  /** Takes the newest evidence; evaluations never overlap, and what is overtaken is left out. */
+  subscribeTo(reference: ValueReference, listener: (value: Value) => void): () => void;
+  /** Takes the newest evidence, while the store is open. */
   feed(data: EvidenceData): void;
+  /** Begins to work; a store may be closed and opened again. */
+  open(): void;
   close(): void;
 }
 
 interface Watch {
   readonly reference: ValueReference;
-  readonly listener: (value: Scalar | Fault | null) => void;
-  value: Scalar | Fault | null;
+  readonly listener: (value: Value) => void;
+  value: Value;
 }
 
 export function createFindingsStore(start: () => Promise<RunningEngine>): FindingsStore {
@@ -38,11 +43,7 @@ export function createFindingsStore(start: () => Promise<RunningEngine>): Findin
   const watches = new Set<Watch>();
   let snapshot: FindingsSnapshot | null = null;
   let failure: unknown = null;
-  let running: Promise<RunningEngine> | null = null;
-  let loaded: Evidence | null = null;
-  let waiting: EvidenceData | null = null;
-  let busy = false;
-  let closed = false;
+  let queue: EvaluationQueue | null = null;
 
   const find = (reference: ValueReference) =>
     snapshot ? findValue(snapshot.findings, snapshot.evidence, reference) : null;
@@ -59,36 +60,6 @@ export function createFindingsStore(start: () => Promise<RunningEngine>): Findin
     }
   }
 
-  async function evaluateOnce(data: EvidenceData): Promise<void> {
-    try {
-      running ??= start();
-      const { engine } = await running;
-      const steps = stepsSince(loaded, data);
-      const findings = steps ? await engine.follow(steps) : await engine.load(data.evidence);
-      loaded = data.evidence;
-      if (!closed) publish({ evidence: data.evidence, findings }, null);
-    } catch (error) {
-      void running?.then(
-        ({ stop }) => stop(),
-        () => undefined,
-      );
-      running = null;
-      loaded = null;
-      if (!closed) publish(null, error);
-    }
-  }
-
-  async function work(): Promise<void> {
-    if (busy) return;
-    busy = true;
-    while (waiting && !closed) {
-      const data = waiting;
-      waiting = null;
-      await evaluateOnce(data);
-    }
-    busy = false;
-  }
-
   return {
     get: () => snapshot,
     failure: () => failure,
@@ -102,25 +73,16 @@ export function createFindingsStore(start: () => Promise<RunningEngine>): Findin
       watches.add(watch);
       return () => watches.delete(watch);
     },
-    feed(data) {
-      if (data.evidence === (waiting?.evidence ?? loaded)) return;
-      waiting = data;
-      void work();
+    feed: (data) => queue?.feed(data),
+    open() {
+      queue ??= createEvaluationQueue(start, {
+        done: (evidence, findings) => publish({ evidence, findings }, null),
+        failed: (reason) => publish(null, reason),
+      });
     },
     close() {
-      closed = true;
-      void running?.then(
-        ({ stop }) => stop(),
-        () => undefined,
-      );
+      queue?.stop();
+      queue = null;
     },
   };
-}
-
-/** The steps from the evidence that the engine holds to this one; null when it must load the whole. */
-function stepsSince(held: Evidence | null, data: EvidenceData) {
-  if (!held) return null;
-  const missing = data.steps.filter(({ version }) => version > held.version);
-  const isWhole = missing.length > 0 && missing.length === data.evidence.version - held.version;
-  return isWhole ? missing : null;
 }

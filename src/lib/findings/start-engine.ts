@@ -1,8 +1,9 @@
-import { wrap, type Remote } from 'comlink';
+import { wrap } from 'comlink';
+import type { Findings } from '#shared/evidence/findings.ts';
 import type { FindingsEngine } from './findings-engine.ts';
 
 export interface RunningEngine {
-  readonly engine: FindingsEngine | Remote<FindingsEngine>;
+  readonly engine: FindingsEngine;
   stop(): void;
 }
 
@@ -13,5 +14,19 @@ export async function startEngine(): Promise<RunningEngine> {
     return { engine: createFindingsEngine(), stop: () => undefined };
   }
   const worker = new Worker(new URL('../../workers/findings.worker.ts', import.meta.url), { type: 'module' });
-  return { engine: wrap<FindingsEngine>(worker), stop: () => worker.terminate() };
+  const remote = wrap<FindingsEngine>(worker);
+  // A worker that cannot start answers nothing at all: its error event is the only sign.
+  const broken = new Promise<never>((_, reject) => {
+    worker.addEventListener('error', (event) =>
+      reject(new Error(event.message || 'The worker did not start.')),
+    );
+  });
+  broken.catch(() => undefined);
+  return {
+    engine: {
+      load: (evidence) => Promise.race<Findings>([remote.load(evidence), broken]),
+      follow: (steps) => Promise.race<Findings>([remote.follow(steps), broken]),
+    },
+    stop: () => worker.terminate(),
+  };
 }

@@ -1,0 +1,1 @@
+export { TrialsStation as Component } from '#src/features/trials/routes/trials-station.tsx';

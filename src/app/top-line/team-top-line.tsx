@@ -1,0 +1,47 @@
+import { useQuery } from '@tanstack/react-query';
+import { Link, useLocation } from 'react-router-dom';
+import { problemsQuery } from '#src/features/season/api/list-problems.ts';
+import { paths } from '#src/lib/paths.ts';
+import { countOf } from '#src/lib/say/say-number.ts';
+import { useSession } from '#src/lib/session/use-session.ts';
+import { useTeam } from '#src/lib/team/team-context.ts';
+import { useDigitKeys } from '../keys/use-digit-keys.ts';
+import { ConnectionWords } from './connection-words.tsx';
+import { TopLine } from './top-line.tsx';
+
+/** The top line of a team's own screens. */
+export function TeamTopLine() {
+  const { team, role } = useTeam();
+  const { user } = useSession();
+  const { data: problems } = useQuery(problemsQuery(team.slug));
+  const { pathname } = useLocation();
+  const season = paths.season(team.slug);
+  const isSeason = pathname === season;
+  useDigitKeys([], season);
+  return (
+    <TopLine
+      home={season}
+      small={team.university}
+      name={team.name}
+      label="Team"
+      stations={[
+        {
+          to: season,
+          words: 'Season',
+          isHere: isSeason,
+          cup: isSeason && problems ? countOf(problems.length, 'problem') : null,
+        },
+      ]}
+      others={[{ to: paths.account(), words: `${user.name}, your account` }]}
+      aside={
+        <>
+          <Link to={paths.account()} className="font-[650] text-ink">
+            {user.name}
+          </Link>
+          <br />
+          <ConnectionWords>{role}</ConnectionWords>
+        </>
+      }
+    />
+  );
+}

@@ -1,0 +1,65 @@
+import { createBrowserRouter, type RouteObject } from 'react-router-dom';
+import { Root } from '#src/app/frames/root.tsx';
+import { ErrorScreen } from '#src/app/screens/error-screen.tsx';
+import { NotFoundScreen } from '#src/app/screens/not-found-screen.tsx';
+
+const problemScreens: RouteObject[] = [
+  { index: true, lazy: () => import('#src/app/screens/last-station-screen.tsx') },
+  { path: 'trials', lazy: () => import('#src/app/screens/trials-screen.tsx') },
+  { path: 'trials/:series', lazy: () => import('#src/app/screens/trials-screen.tsx') },
+  { path: 'model', lazy: () => import('#src/app/screens/model-screen.tsx') },
+  { path: 'model/claims', lazy: () => import('#src/app/screens/claims-screen.tsx') },
+  { path: 'model/:n', lazy: () => import('#src/app/screens/model-screen.tsx') },
+  { path: 'report', lazy: () => import('#src/app/screens/report-screen.tsx') },
+  { path: 'settings', lazy: () => import('#src/features/problem/routes/problem-settings-screen.tsx') },
+];
+
+const signedInScreens: RouteObject[] = [
+  {
+    lazy: () => import('#src/app/frames/account-frame.tsx'),
+    children: [{ path: 'account', lazy: () => import('#src/features/session/routes/account-screen.tsx') }],
+  },
+  {
+    path: 'team/:team',
+    lazy: () => import('#src/app/frames/team-frame.tsx'),
+    children: [
+      {
+        lazy: () => import('#src/app/frames/team-screens-frame.tsx'),
+        children: [
+          { index: true, lazy: () => import('#src/features/season/routes/season-screen.tsx') },
+          {
+            path: 'new-problem',
+            lazy: () => import('#src/features/problem/routes/new-problem-screen.tsx'),
+          },
+        ],
+      },
+      {
+        path: 'problem/:problem',
+        lazy: () => import('#src/app/frames/problem-frame.tsx'),
+        // A screen that fails leaves the top line standing.
+        children: [{ errorElement: <ErrorScreen />, children: problemScreens }],
+      },
+    ],
+  },
+];
+
+/** Every address of the product; each screen is a file of its own, loaded when it is first opened. */
+export const routes: RouteObject[] = [
+  {
+    element: <Root />,
+    children: [
+      {
+        errorElement: <ErrorScreen />,
+        children: [
+          { index: true, lazy: () => import('#src/features/session/routes/sign-in-screen.tsx') },
+          { lazy: () => import('#src/app/frames/signed-in-frame.tsx'), children: signedInScreens },
+          { path: '*', element: <NotFoundScreen /> },
+        ],
+      },
+    ],
+  },
+];
+
+export function createRouter() {
+  return createBrowserRouter(routes);
+}
