@@ -1,11 +1,11 @@
+import { ClaimSheet } from '#src/features/claims/routes/claim-sheet.tsx';
+import { useWhere } from '#src/lib/events/use-where.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
-import { PlainPage } from './plain-page.tsx';
+import { useTitle } from '#src/lib/use-title.ts';
 
 export function Component() {
   const { problem } = useProblem();
-  return (
-    <PlainPage title={problem.title}>
-      <p>{problem.statement}</p>
-    </PlainPage>
-  );
+  useTitle('Claims', problem.title);
+  useWhere('Claims');
+  return <ClaimSheet />;
 }

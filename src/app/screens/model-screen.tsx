@@ -1,11 +1,13 @@
+import { ClaimList } from '#src/features/claims/components/claim-list.tsx';
+import { ModelStation } from '#src/features/model/routes/model-station.tsx';
+import { useWhere } from '#src/lib/events/use-where.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
-import { PlainPage } from './plain-page.tsx';
+import { useTitle } from '#src/lib/use-title.ts';
 
+/** The model, its comparison, and the claims that stand on them. */
 export function Component() {
   const { problem } = useProblem();
-  return (
-    <PlainPage title={problem.title}>
-      <p>{problem.statement}</p>
-    </PlainPage>
-  );
+  useTitle('Model', problem.title);
+  useWhere('Model');
+  return <ModelStation claims={<ClaimList />} />;
 }
