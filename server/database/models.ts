@@ -1,6 +1,6 @@
 /** Every table as a Sequelize model, bound to one connection; and what they are to one another. */
 import type { Sequelize } from 'sequelize';
-import { definePreferences, defineUsers } from '#server/features/account/model.ts';
+import { defineUsers } from '#server/features/account/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
 import { defineSessions } from '#server/features/session/model.ts';
@@ -12,7 +12,6 @@ export type Models = ReturnType<typeof defineModels>;
 export function defineModels(sequelize: Sequelize) {
   return {
     users: defineUsers(sequelize),
-    preferences: definePreferences(sequelize),
     sessions: defineSessions(sequelize),
     teams: defineTeams(sequelize),
     memberships: defineMemberships(sequelize),

@@ -26,6 +26,18 @@ export const getEvidence = endpoint({
   answer: z.object({ evidence: evidenceSchema, rowVersions: z.record(z.string(), z.number().int()) }),
 });
 
+/**
+ * Every number, curve and verdict, computed by the server with the code that the screens use; for scripts. Maps come as
+ * objects by key, columns as lists; what is not finite is null.
+ */
+export const getFindings = endpoint({
+  method: 'GET',
+  path: `${PROBLEM_PATH}/findings`,
+  body: null,
+  status: 200,
+  answer: z.looseObject({ version: z.number().int() }),
+});
+
 /** A trial as a client sends it: its id is made by the client, so that sending it twice logs it once. */
 export const newTrialSchema = z.object({
   id: idSchema,

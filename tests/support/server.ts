@@ -1,4 +1,5 @@
 /** The real app on a free port with a fresh data folder, and people signed in to it. */
+import { createHash } from 'node:crypto';
 import { copyFileSync, existsSync, mkdirSync, mkdtempSync, renameSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -8,6 +9,7 @@ import { parseEnvironment } from '#server/config/environment.ts';
 import { DEMO_PEOPLE } from '#server/database/seeders/demo/people.ts';
 import type { ServerOptions, RunningServer } from '#server/start-server.ts';
 import { startServer } from '#server/start-server.ts';
+import { readSource, sourceFiles } from './source-files.ts';
 
 /** The moment every test server believes it is first started. */
 export const FIRST_START = new Date('2026-03-03T12:00:00.000Z');
@@ -75,7 +77,15 @@ function testEnvironment(dataFolder: string) {
   return parseEnvironment({ NODE_ENV: 'test', PORT: '0', HOLDWATER_DATA: dataFolder });
 }
 
-const BASE_FOLDER = join(tmpdir(), `holdwater-base-${process.ppid}`);
+/** One for each run and each form of the database, so that none of an older form is ever copied. */
+const BASE_FOLDER = join(tmpdir(), `holdwater-base-${process.ppid}-${databaseForm()}`);
+
+function databaseForm(): string {
+  const hash = createHash('sha256');
+  for (const path of sourceFiles('server/database', 'server/features/evidence'))
+    hash.update(readSource(path));
+  return hash.digest('hex').slice(0, 16);
+}
 
 /** Migrated and seeded once for each run of the tests, then copied: hashing passphrases takes its time. */
 async function migratedBase(): Promise<string> {

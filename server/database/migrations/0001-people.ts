@@ -20,10 +20,6 @@ export const people: Migration = {
     )`);
     await run('CREATE INDEX sessions_by_user ON sessions (user_id)');
     await run('CREATE INDEX sessions_by_expiry ON sessions (expires)');
-    await run(`CREATE TABLE preferences (
-      user_id TEXT PRIMARY KEY REFERENCES users (id) ON DELETE CASCADE,
-      content TEXT NOT NULL
-    )`);
     await run(`CREATE TABLE teams (
       id TEXT PRIMARY KEY,
       slug TEXT NOT NULL UNIQUE,
@@ -53,7 +49,7 @@ export const people: Migration = {
     await run('CREATE INDEX fights_by_team ON fights (team_id, at)');
   },
   async down(run) {
-    for (const table of ['fights', 'memberships', 'teams', 'preferences', 'sessions', 'users']) {
+    for (const table of ['fights', 'memberships', 'teams', 'sessions', 'users']) {
       await run(`DROP TABLE ${table}`);
     }
   },

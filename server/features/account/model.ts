@@ -25,19 +25,3 @@ export function defineUsers(sequelize: Sequelize) {
     createdAt: DataTypes.STRING,
   });
 }
-
-export interface PreferencesModel extends Model<
-  InferAttributes<PreferencesModel>,
-  InferCreationAttributes<PreferencesModel>
-> {
-  userId: string;
-  /** JSON of the contract's preferences. */
-  content: string;
-}
-
-export function definePreferences(sequelize: Sequelize) {
-  return sequelize.define<PreferencesModel>('preferences', {
-    userId: { type: DataTypes.STRING, primaryKey: true },
-    content: DataTypes.TEXT,
-  });
-}

@@ -1,10 +1,15 @@
 import type { Express } from 'express';
-import { definitions, getEvidence as getEvidenceEndpoint } from '#shared/contracts/evidence.ts';
+import {
+  definitions,
+  getEvidence as getEvidenceEndpoint,
+  getFindings as getFindingsEndpoint,
+} from '#shared/contracts/evidence.ts';
 import type { DefinitionTable } from '#shared/contracts/evidence.ts';
 import type { ServerDeps } from '#server/deps.ts';
 import { getIfMatch } from '#server/middleware/if-match.ts';
 import { mountProblem } from '#server/middleware/mount.ts';
 import { createDefinition, removeDefinition, replaceDefinition } from './definitions.ts';
+import { findingsToJson } from './findings-json.ts';
 import { DEFINITION_TABLES } from './model.ts';
 import { getEvidence } from './service.ts';
 
@@ -13,6 +18,10 @@ export function mountEvidence(app: Express, deps: ServerDeps): void {
     const stored = await getEvidence(deps, place.problem.id);
     response.set('etag', `"${stored.evidence.version}"`).set('cache-control', 'private, no-cache');
     return stored;
+  });
+  mountProblem(app, deps.database, getFindingsEndpoint, 'read', async ({ place }) => {
+    const { evidence } = await getEvidence(deps, place.problem.id);
+    return findingsToJson(await deps.evaluation.getFindings(place.problem.id, evidence));
   });
   for (const table of DEFINITION_TABLES) mountDefinitions(app, deps, table);
 }

@@ -12,6 +12,7 @@ import type { ProblemPlace } from '#server/features/teams/service.ts';
 import type { Actor } from '#server/middleware/actor.ts';
 import { changedTrial } from './changed-trial.ts';
 import { assertReadings } from './check-readings.ts';
+import type { TrialReadings } from './check-readings.ts';
 import type { TrialModel } from './model.ts';
 
 const MAX_TRIALS = 10_000;
@@ -41,7 +42,7 @@ export async function logTrials(
     const { fresh, known } = await sort(deps, place, actor, batch, draft.transaction);
     loggedBefore = fresh.length === 0 ? (known[0]?.loggedVersion ?? null) : null;
     if (draft.evidence.trials.length + fresh.length > MAX_TRIALS) throw tooManyTrials();
-    for (const trial of fresh) assertReadings(trial.id, trial.values, series, draft.evidence);
+    assertReadings(namedIn(batch, fresh), series, draft.evidence);
     await insert(deps, place, actor, { series, fresh }, draft);
   });
   if (loggedBefore === null || step.changes.length > 0) return step;
@@ -62,7 +63,10 @@ export async function changeTrial(
     const series = draft.evidence.series.find(({ id }) => id === before?.series);
     if (!before || !series) throw notFound('This trial is not here.');
     const after = changedTrial(before, change, { by: actor.name, at: draft.at });
-    if (change.kind === 'correct') assertReadings(trialId, after.values, series, draft.evidence);
+    if (change.kind === 'correct') {
+      const name = `${series.letter}${after.number}`;
+      assertReadings([{ name, path: 'change.values', values: after.values }], series, draft.evidence);
+    }
     await deps.database.models.trials.update(
       {
         values: JSON.stringify(after.values),
@@ -94,6 +98,15 @@ async function sort(
   if (known.some((row) => row.seriesId !== batch.series || row.userId !== actor.id)) throw idTaken();
   const knownIds = new Set(known.map(({ id }) => id));
   return { fresh: batch.trials.filter(({ id }) => !knownIds.has(id)), known };
+}
+
+/** Trials that have no number yet, named by their place in the batch. */
+function namedIn(batch: Batch, fresh: readonly NewTrial[]): TrialReadings[] {
+  return batch.trials.flatMap((trial, index) => {
+    if (!fresh.includes(trial)) return [];
+    const name = batch.trials.length === 1 ? 'This trial' : `Trial ${index + 1} of these`;
+    return [{ name, path: `trials.${index}.values`, values: trial.values }];
+  });
 }
 
 async function insert(
