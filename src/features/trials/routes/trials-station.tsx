@@ -3,6 +3,7 @@ import { useParams } from 'react-router-dom';
 import { Word } from '#src/components/word.tsx';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
+import { Cautions } from '../cautions/cautions.tsx';
 import { EntryBar, type EntryBarHandle } from '../components/entry-bar.tsx';
 import { FirstSeries } from '../components/first-series.tsx';
 import { PastePanel } from '../components/paste-panel.tsx';
@@ -73,7 +74,10 @@ export function TrialsStation() {
           )
         )}
       </section>
-      <Register />
+      <div>
+        <Register />
+        <Cautions />
+      </div>
       {mayWrite && view && view.series.readings.length > 0 && (
         <EntryBar
           key={`${view.series.id} ${correcting?.trial.id ?? 'next'}`}
