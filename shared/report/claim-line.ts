@@ -2,14 +2,24 @@
 import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { Findings, Verdict } from '#shared/evidence/findings.ts';
 
+/** What is shown of a claim. */
 export interface ClaimLine {
   readonly n: number;
   readonly text: string;
   readonly verdict: Verdict;
+  /** "Measured and predicted differ by 2.2 u; this claim holds at 2 u or less." */
   readonly why: string;
 }
 
-/** Null: the claim is gone. */
-export function claimLine(_claim: string, _evidence: Evidence, _findings: Findings): ClaimLine | null {
-  throw new Error('claimLine: not written');
+/** A claim's line; null when the claim is gone. */
+export function claimLine(claim: string, evidence: Evidence, findings: Findings): ClaimLine | null {
+  const row = evidence.claims.find(({ id }) => id === claim);
+  if (row === undefined) return null;
+  const finding = findings.claims.get(claim);
+  return {
+    n: row.n,
+    text: row.text,
+    verdict: finding?.verdict ?? 'Undecided',
+    why: finding?.fault?.sentence ?? finding?.sentence ?? row.openBecause ?? '',
+  };
 }
