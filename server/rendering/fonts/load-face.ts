@@ -18,7 +18,7 @@ const faces = new Map<FontName, Face>();
 export function loadFace(name: FontName): Face {
   const known = faces.get(name);
   if (known) return known;
-  const font = create(readFileSync(join(fontsFolder(), FONT_FILES[name])));
+  const font = openFont(name);
   prewarm(font);
   const coverage = new Set(font.characterSet);
   const glyphs = new Map<number, Glyph>();
@@ -36,6 +36,12 @@ export function loadFace(name: FontName): Face {
   };
   faces.set(name, face);
   return face;
+}
+
+function openFont(name: FontName): Font {
+  const font = create(readFileSync(join(fontsFolder(), FONT_FILES[name])));
+  if (!('characterSet' in font)) throw new TypeError(`loadFace: needs one face a file, got a collection in ${name}`);
+  return font;
 }
 
 /**

@@ -91,7 +91,7 @@ function boxSymbol(node: KatexNode, style: FormulaStyle): FormulaBox {
     x += (glyph.advanceWidth / face.font.unitsPerEm) * size;
   }
   const css = node.style ?? {};
-  const left = cssLength(css.marginLeft, style.em);
+  const left = cssLength(css.marginLeft, style.em) + cssLength(css.paddingLeft, style.em);
   const right = cssLength(css.marginRight, style.em);
   // KaTeX writes the italic correction as the right margin; a margin of the symbol's own takes its place.
   const italic = Math.max(0, node.italic ?? 0) * style.em;

@@ -30,7 +30,7 @@ const SIZES = [0.5, 0.6, 0.7, 0.8, 0.9, 1, 1.2, 1.44, 1.728, 2.074, 2.488] as co
 
 /** Classes that change the family, as KaTeX's style sheet has them; text faces are the report's, as on screen. */
 const FAMILY: Readonly<Record<string, Family>> = {
-  mathnormal: 'Report', mathrm: 'Report', textrm: 'Report', mainrm: 'Main',
+  'accent-body': 'Main', mathnormal: 'Report', mathrm: 'Report', textrm: 'Report', mainrm: 'Main',
   mathit: 'Main', mathbf: 'Main', boldsymbol: 'Math',
   textsf: 'SansSerif', mathsf: 'SansSerif', mathboldsf: 'SansSerif', textboldsf: 'SansSerif',
   mathsfit: 'SansSerif', mathitsf: 'SansSerif', textitsf: 'SansSerif',

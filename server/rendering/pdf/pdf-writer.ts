@@ -1,13 +1,15 @@
 import type { Glyph } from 'fontkit';
-import PDFDocument, {
+import { loadFace, type Face } from '../fonts/load-face.ts';
+import {
+  createPdfDocument,
   type EmbeddedFont,
   type OutlineItem,
+  type PdfDocument,
   type Picture,
   type Reference,
   type StructureElement,
   type StructureOptions,
-} from 'pdfkit';
-import { loadFace, type Face } from '../fonts/load-face.ts';
+} from './pdf-document.ts';
 
 /** Sizes of paper in points. */
 export const PAPER = { A4: { width: 595.28, height: 841.89 }, Letter: { width: 612, height: 792 } } as const;
@@ -37,7 +39,7 @@ export class PdfWriter {
   readonly size: { readonly width: number; readonly height: number };
   readonly root: StructureElement;
   readonly outline: OutlineItem;
-  private readonly document: PDFDocument;
+  private readonly document: PdfDocument;
   private readonly chunks: Uint8Array[] = [];
   private readonly finished: Promise<void>;
   private readonly fonts = new Map<Face, { font: EmbeddedFont; known: DocumentFont }>();
@@ -46,7 +48,7 @@ export class PdfWriter {
 
   constructor(options: PdfOptions) {
     this.size = PAPER[options.paper];
-    this.document = new PDFDocument({
+    this.document = createPdfDocument({
       size: [this.size.width, this.size.height],
       margin: 0,
       autoFirstPage: false,
@@ -195,6 +197,12 @@ export class PdfWriter {
     });
   }
 
+  /** A bookmark to a height of the present page. */
+  bookmark(parent: OutlineItem, words: string, y: number, expanded = false): OutlineItem {
+    // pdfkit measures both from the far corner, so the page's width leads to its left edge.
+    return parent.addItem(words, { top: y, left: this.size.width, expanded });
+  }
+
   async finish(): Promise<Uint8Array> {
     this.root.end();
     this.document.end();
@@ -204,7 +212,7 @@ export class PdfWriter {
 }
 
 /** pdfkit copies the information into XML as it stands. */
-function escapeMetadata(document: PDFDocument): void {
+function escapeMetadata(document: PdfDocument): void {
   const original = document._addInfo.bind(document);
   document._addInfo = () => {
     const kept = { ...document.info };

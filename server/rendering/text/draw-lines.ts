@@ -1,14 +1,17 @@
-import type { StructureElement } from 'pdfkit';
 import { shapeText } from '../fonts/shape-text.ts';
 import { drawFormulaPart } from '../formulas/draw-formula.ts';
-import { length, strokeColour } from '../pdf/operators.ts';
+import { fillColour, length, strokeColour } from '../pdf/operators.ts';
+import type { StructureElement } from '../pdf/pdf-document.ts';
 import type { PdfWriter } from '../pdf/pdf-writer.ts';
 import { TextPen } from '../pdf/text-pen.ts';
+import { wordSpace } from './build-items.ts';
 import type { FormulaRun, RunElement, TextRun, TextStyle } from './inline-run.ts';
 import type { Segment, TextLine } from './layout-paragraph.ts';
 
 type Run = TextRun | FormulaRun;
 
+const UNDERLINE = 0.5;
+const UNDERLINE_DROP = 0.18;
 const LINK_HEIGHT = 1.2;
 const LINK_ASCENT = 0.92;
 const DASH = { width: 0.8, pattern: '[2 1.6] 0 d', padX: 1.6, ascent: 0.82, descent: 0.3 };
@@ -24,8 +27,8 @@ export interface LinesPlace {
 }
 
 /**
- * The structure element of a text, and the elements of its links, formulas and references, which stay open while the
- * text goes on over a page's end.
+ * The structure element of a text, and the elements of its links, formulas and references, which go on with the text
+ * over a page's end.
  */
 export class LinesOwner {
   private readonly inner = new Map<Run, StructureElement>();
@@ -44,12 +47,6 @@ export class LinesOwner {
     this.element.add(element);
     this.inner.set(run, element);
     return element;
-  }
-
-  end(): void {
-    for (const element of this.inner.values()) element.end();
-    this.inner.clear();
-    this.element.end();
   }
 }
 
@@ -103,7 +100,7 @@ function stretchesOf(segments: readonly Segment[]): Stretch[] {
 
 function drawSegments(writer: PdfWriter, segments: readonly Segment[], x: number, y: number): void {
   const pen = new TextPen(writer);
-  for (const { x: offset, box, space } of segments) {
+  for (const [i, { x: offset, box, space }] of segments.entries()) {
     const left = x + offset;
     if (box.kind === 'part') {
       const { size, colour } = box.run;
@@ -114,6 +111,12 @@ function drawSegments(writer: PdfWriter, segments: readonly Segment[], x: number
     const baseline = y - (style.rise ?? 0);
     pen.text(box.shaped, style.size, left, baseline, style.colour);
     if (space) pen.text(shapeText(style.stack, ' '), style.size, left + box.width, baseline, style.colour);
+    if (box.run.underline !== undefined) {
+      pen.end();
+      const goesOn = space && segments[i + 1]?.box.run === box.run;
+      const width = box.width + (goesOn ? wordSpace(style) : 0);
+      underline(writer, left, baseline, width, style, box.run.underline);
+    }
     if (box.run.dashed !== undefined) {
       pen.end();
       dashedBox(writer, left, baseline, box.width, style, box.run.dashed);
@@ -139,6 +142,18 @@ function dashedBox(
   ];
   const outline = `${box.map(length).join(' ')} re S`;
   writer.write(`q ${strokeColour(colour)} ${DASH.width} w ${DASH.pattern} ${outline} Q`);
+}
+
+function underline(
+  writer: PdfWriter,
+  x: number,
+  y: number,
+  width: number,
+  style: TextStyle,
+  colour: string,
+): void {
+  const line = `${length(x)} ${length(y + UNDERLINE_DROP * style.size)} ${length(width)} ${UNDERLINE} re f`;
+  writer.write(`${fillColour(colour)} ${line}`);
 }
 
 function linkArea(

@@ -13,7 +13,7 @@ export function hyphenate(word: string): readonly string[] {
   if (!PLAIN_WORD.test(word)) return [word];
   const known = cache.get(word);
   if (known) return known;
-  const pieces = hyphenator(word).split(SOFT_HYPHEN);
+  const pieces = String(hyphenator(word)).split(SOFT_HYPHEN);
   cache.set(word, pieces);
   return pieces;
 }

@@ -20,6 +20,8 @@ interface RunParts {
   readonly element?: RunElement | undefined;
   /** Drawn around the run: a number that is typed and not tied, or whose source is gone. */
   readonly dashed?: string | undefined;
+  /** Colour of a hairline under the run: a link. */
+  readonly underline?: string | undefined;
 }
 
 export interface TextRun extends RunParts {

@@ -10,6 +10,9 @@ export interface ChartAxis {
 
 const AIR_Y = 0.08;
 const AIR_X = 0.035;
+/** The strip's lowest figure stands clear of the bottom line. */
+const AIR_Z_BELOW = 0.35;
+const AIR_Z_ABOVE = 0.05;
 /** Least distance of two tick figures, in CSS pixels. */
 const TICK_GAP_Y = 12;
 
@@ -75,8 +78,8 @@ export function residualAxis(scene: ComparisonScene, height: number): ChartAxis 
   const showsK = (half * scene.k) / end >= TICK_GAP_Y && half * (1 - scene.k / end) >= TICK_GAP_Y * 0.9;
   const values = showsK ? [-end, -scene.k, 0, scene.k, end] : [-end, 0, end];
   return {
-    min: -end,
-    max: end,
+    min: -end * (1 + AIR_Z_BELOW),
+    max: end * (1 + AIR_Z_ABOVE),
     ticks: values.map((value) => ({ value, text: tickText(value, Number.isInteger(value) ? 1 : 0.1, true) })),
   };
 }

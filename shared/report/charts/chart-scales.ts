@@ -10,7 +10,7 @@ import { richTextWords } from './rich-text.ts';
 export const TOP = 26;
 const BOTTOM = 27;
 /** Heights of the plot, the gap that holds the strip's title, and the strip. */
-const WEIGHTS = { plot: 3, gap: 0.55, strip: 1 } as const;
+const WEIGHTS = { plot: 2.75, gap: 0.55, strip: 1.15 } as const;
 const TITLE_CHARACTER = CHART_WORD_SIZE * 0.56;
 const FIGURE_CHARACTER = CHART_FIGURE_SIZE * 0.58;
 

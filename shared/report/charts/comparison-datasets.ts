@@ -17,6 +17,7 @@ export function comparisonDatasets(scene: ComparisonScene, theme: ChartTheme): C
     ...measuredDatasets(scene, theme),
     {
       type: 'scatter',
+      yAxisID: 'y',
       label: 'excluded',
       data: scene.excluded.map(({ x, y, trial }) => ({ x, y, trial })),
       pointStyle: 'circle',
@@ -37,6 +38,7 @@ function measuredDatasets(scene: ComparisonScene, theme: ChartTheme): Comparison
     const form = POINT_FORMS[i % POINT_FORMS.length] ?? 'circle';
     return {
       type: 'scatter',
+      yAxisID: 'y',
       label: `measured ${series.letter}`,
       data: series.points.map(({ x, y, point }) => ({ x, y, point })),
       pointStyle: form,
@@ -68,6 +70,7 @@ function curveDatasets(stretch: CurveStretch, theme: ChartTheme): ComparisonData
     stretch.x.map((x, i) => ({ x, y: (stretch.y[i] ?? 0) + side * (stretch.half[i] ?? 0) }));
   const line: ComparisonDataset = {
     type: 'line',
+    yAxisID: 'y',
     label: stretch.trusted ? 'predicted' : 'predicted, outside trust',
     data: points(0),
     pointRadius: 0,
@@ -77,7 +80,7 @@ function curveDatasets(stretch: CurveStretch, theme: ChartTheme): ComparisonData
     borderDash: stretch.trusted ? [] : [2, 3],
   };
   if (!stretch.trusted) return [line];
-  const edge = { type: 'line' as const, pointRadius: 0, pointHitRadius: 0, borderWidth: 0 };
+  const edge = { type: 'line' as const, yAxisID: 'y', pointRadius: 0, pointHitRadius: 0, borderWidth: 0 };
   return [
     line,
     { ...edge, label: 'band', data: points(1), fill: '+1', backgroundColor: theme.copper + BAND_ALPHA },

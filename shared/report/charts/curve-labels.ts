@@ -10,6 +10,7 @@ import { symbolRuns } from './quantity-label.ts';
 import { drawRichText, plain, richTextWidth, type LabelStyle, type TextRun } from './rich-text.ts';
 
 const ASCENT = 10;
+const TITLE_WIDTH = 70;
 const DESCENT = 3.5;
 /** More labels of excluded trials than this make a thicket; the table names them all. */
 const MOST_EXCLUDED_LABELS = 4;
@@ -30,7 +31,7 @@ export function curveLabels(scene: ComparisonScene, theme: ChartTheme): Plugin {
         const bounds = {
           left: place.left,
           right: place.right + 4,
-          top: place.plot.top - 6,
+          top: place.plot.top - 20,
           bottom: place.plot.bottom,
         };
         const box = placeLabel(label.candidates(width), taken, bounds);
@@ -153,7 +154,9 @@ function alongCurve(scene: ComparisonScene, place: ChartPlace): (width: number) 
 
 /** What labels must keep clear of: the band in narrow slices, the points with their bars, the dotted line. */
 function obstacles(scene: ComparisonScene, place: ChartPlace): Box[] {
-  const boxes: Box[] = [];
+  const { left, plot } = place;
+  // The title of the vertical axis.
+  const boxes: Box[] = [{ left, right: left + TITLE_WIDTH, top: plot.top - 26, bottom: plot.top - 4 }];
   for (const stretch of scene.curve) {
     for (let i = 1; i < stretch.x.length; i++) {
       const ends = [i - 1, i].map((j) => {

@@ -1,0 +1,64 @@
+import type { InlineRun } from '../text/inline-run.ts';
+import { drawLines, LinesOwner } from '../text/draw-lines.ts';
+import { drawTable, type TableRow } from './draw-table.ts';
+import { sourceWords } from './number-source-words.ts';
+import { CELL, CELL_HEAD, HEADINGS, hueColour, textStyle } from './print-style.ts';
+import type { RenderContext } from './render-context.ts';
+import { layOutLines } from './text-block.ts';
+
+const TITLE = 'Where the numbers come from';
+const SPACE_ABOVE = 22;
+const SPACE_BELOW = 2;
+
+/** The list at the end: the letter of each tied number, its value, its source and how it was reduced. */
+export function drawSourcesList(context: RenderContext): void {
+  const { writer, flow, sources, left, width } = context;
+  if (sources.all.length === 0) return;
+  const face = HEADINGS[2];
+  const title = layOutLines([{ kind: 'text', text: TITLE, style: textStyle(face) }], face, width);
+  const heading = writer.element('H2', { title: TITLE });
+  context.element.add(heading);
+  flow.keepWithNext(SPACE_ABOVE, title.height + SPACE_BELOW, (y) => {
+    writer.bookmark(context.outline, TITLE, y);
+    drawLines(writer, title.lines, { x: left, y, owner: new LinesOwner(writer, heading, 'H2') });
+  });
+  const element = writer.element('Table');
+  context.element.add(element);
+  const head: TableRow = { cells: ['', 'Value', 'Source', 'Reduction'].map(headCell) };
+  const rows = sources.all.map((number): TableRow => {
+    const { source, reduction } = sourceWords(number, context);
+    const value = textStyle(CELL, 'ui', hueColour(number.shown.hue));
+    return {
+      cells: [
+        { runs: [plain(number.letter)] },
+        { runs: [{ kind: 'text', text: number.shown.text, style: value, whole: true }] },
+        { runs: wordRuns(source) },
+        { runs: wordRuns(reduction) },
+      ],
+    };
+  });
+  drawTable({ aligns: ['left', 'left', 'left', 'left'], head, rows }, element, context);
+}
+
+function headCell(text: string) {
+  return {
+    runs: text === '' ? [] : [{ kind: 'text' as const, text, style: textStyle(CELL_HEAD) }],
+    isHead: true,
+  };
+}
+
+function plain(text: string): InlineRun {
+  return { kind: 'text', text, style: textStyle(CELL) };
+}
+
+/** Words with the symbol u in the report's italic. */
+function wordRuns(text: string): InlineRun[] {
+  return text
+    .split(/(?<=\s)(u)(?=²|$)/u)
+    .filter((piece) => piece !== '')
+    .map((piece) => ({
+      kind: 'text',
+      text: piece,
+      style: textStyle(CELL, piece === 'u' ? 'bodyItalic' : 'ui'),
+    }));
+}
