@@ -1,5 +1,6 @@
 import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { Root } from '#src/app/frames/root.tsx';
+import { Loading } from '#src/components/loading.tsx';
 import { ErrorScreen } from '#src/app/screens/error-screen.tsx';
 import { NotFoundScreen } from '#src/app/screens/not-found-screen.tsx';
 
@@ -47,6 +48,7 @@ const signedInScreens: RouteObject[] = [
 export const routes: RouteObject[] = [
   {
     element: <Root />,
+    hydrateFallbackElement: <Loading what="the page" />,
     children: [
       {
         errorElement: <ErrorScreen />,

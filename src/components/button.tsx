@@ -40,7 +40,7 @@ export function Button({
       aria-disabled={busy || undefined}
       onClick={busy ? undefined : onClick}
       className={classNames(
-        'inline-flex items-center justify-center gap-2 border-[1.25px] font-[550] whitespace-nowrap transition-opacity duration-[120ms] disabled:opacity-50',
+        'inline-flex items-center justify-center gap-2 border-[1.25px] font-ui font-[550] whitespace-nowrap transition-opacity duration-[120ms] disabled:opacity-50',
         busy && 'opacity-70',
         KINDS[kind],
         SIZES[size],

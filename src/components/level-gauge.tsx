@@ -40,9 +40,10 @@ export function LevelGauge({ levels, named = false }: LevelGaugeProps) {
   return (
     <ol
       className={classNames(
-        'relative grid grid-cols-5',
-        !named &&
-          'after:absolute after:top-[43px] after:left-2.5 after:w-[80%] after:border-b-[1.5px] after:border-ink-2',
+        'relative grid',
+        named
+          ? 'grid-cols-5 gap-y-2 max-[360px]:grid-cols-4'
+          : 'grid-cols-5 after:absolute after:top-[43px] after:left-2.5 after:w-[80%] after:border-b-[1.5px] after:border-ink-2',
       )}
     >
       {levels.map(({ section, level }, index) => (

@@ -74,13 +74,13 @@ export function VerdictCount({ holds, leaks, undecided }: VerdictCountProps) {
     ['Undecided', undecided, 'undecided'],
   ] as const;
   return (
-    <span className="flex gap-3 text-sm font-semibold">
+    <span className="flex gap-3 text-sm font-semibold max-sm:gap-[9px]">
       {counts.map(([verdict, count, words]) => (
         <span
           key={verdict}
           title={`${count} ${words}`}
           className={classNames(
-            'flex items-center gap-[5px]',
+            'flex items-center gap-[5px] max-sm:gap-1',
             count === 0 ? 'font-normal text-ink-3' : HUES[verdict],
           )}
         >

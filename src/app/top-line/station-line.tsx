@@ -13,7 +13,7 @@ export function StationLine({ label, stations }: StationLineProps) {
   return (
     <nav
       aria-label={label}
-      className="mx-auto flex justify-center gap-1.5 max-md:order-3 max-md:-mx-2 max-md:w-[calc(100%+16px)] max-md:justify-between max-md:overflow-x-clip max-sm:hidden"
+      className="mx-auto flex justify-center gap-1.5 max-md:order-3 max-md:-mx-2 max-md:w-[calc(100%+16px)] max-md:justify-between max-sm:hidden"
     >
       {stations.map(({ to, words, isHere, cup }) => (
         <Link

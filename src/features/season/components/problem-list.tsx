@@ -8,7 +8,7 @@ interface ProblemListProps {
 }
 
 export const PROBLEM_GRID =
-  'sm:grid sm:grid-cols-[44px_minmax(0,1fr)_76px_minmax(300px,440px)_118px_64px] sm:items-center sm:gap-x-3.5';
+  'md:grid md:grid-cols-[44px_minmax(0,1fr)_76px_minmax(300px,440px)_118px_64px] md:items-center md:gap-x-3.5';
 
 /** Problems by number: how far each section has come, and what its claims hold. */
 export function ProblemList({ team, problems }: ProblemListProps) {
@@ -16,7 +16,7 @@ export function ProblemList({ team, problems }: ProblemListProps) {
     <section aria-label="Problems" className="page-sheet max-sm:-mx-4.5 sm:px-[34px] sm:pb-2">
       <div
         aria-hidden="true"
-        className={`h-[46px] border-b-[1.25px] border-ink text-xs text-ink-2 max-md:!hidden ${PROBLEM_GRID}`}
+        className={`h-[46px] border-b-[1.25px] border-ink text-xs text-ink-2 max-md:hidden ${PROBLEM_GRID}`}
       >
         <span />
         <span>Problem</span>

@@ -20,9 +20,9 @@ export function ProblemRow({ team, problem }: ProblemRowProps) {
   const isNarrow = useMedia('(max-width: 899.98px)');
   return (
     <li
-      className={`relative border-hair max-sm:border-b max-sm:border-rule max-sm:px-4.5 max-sm:py-4 sm:min-h-[98px] sm:not-last:border-b max-md:!block max-md:py-4 ${PROBLEM_GRID}`}
+      className={`relative border-hair max-md:flex max-md:flex-wrap max-md:items-baseline max-md:gap-x-2.5 max-md:py-4 max-sm:border-b max-sm:border-rule max-sm:pr-3.5 max-sm:pl-4.5 sm:not-last:border-b md:min-h-[98px] ${PROBLEM_GRID}`}
     >
-      <span className="font-report text-[24px]/[30px] text-ink-3 max-md:float-left max-md:min-w-9 max-md:text-[20px]/[27px] md:self-start md:pt-[17px]">
+      <span className="font-report text-[24px]/[30px] text-ink-3 max-md:min-w-4 max-md:text-[20px]/[27px] md:self-start md:pt-[17px]">
         {problem.number}
       </span>
       <div className="md:py-4 md:pr-3">
@@ -33,9 +33,11 @@ export function ProblemRow({ team, problem }: ProblemRowProps) {
           {problem.title}
         </Link>
         {problem.stage && (
-          <span className="font-report text-[17px]/7 text-ink-2 italic">{STAGE_WORDS[problem.stage]}</span>
+          <span className="font-report text-[17px]/7 whitespace-nowrap text-ink-2 italic max-sm:text-[16px]">
+            {STAGE_WORDS[problem.stage]}
+          </span>
         )}
-        <p className="mt-px line-clamp-2 max-w-[352px] text-sm text-pretty text-ink-2 max-md:hidden">
+        <p className="mt-px line-clamp-3 max-w-[352px] text-sm text-pretty text-ink-2 max-md:hidden">
           {problem.statement}
         </p>
       </div>
@@ -47,16 +49,16 @@ export function ProblemRow({ team, problem }: ProblemRowProps) {
           </span>
         ))}
       </span>
-      <div className="max-md:clear-left max-md:mt-2.5">
+      <div className="max-md:order-last max-md:mt-2.5 max-md:w-full">
         <LevelGauge levels={problem.levels} named={isNarrow} />
       </div>
-      <div className="max-md:mt-3">
+      <div className="max-md:ml-auto">
         <VerdictCount {...problem.claims} />
       </div>
       <WordLink
         to={paths.settings(address)}
         aria-label={`Settings of ${problem.title}`}
-        className="relative z-1 justify-self-end text-xs max-md:absolute max-md:right-4.5 max-md:bottom-4"
+        className="relative z-1 justify-self-end text-xs max-md:ml-3 max-sm:hidden"
       >
         Settings
       </WordLink>

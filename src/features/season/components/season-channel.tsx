@@ -1,5 +1,6 @@
 import type { Fight, Team } from '#shared/contracts/teams.ts';
 import { dayAndMonth, dayAndShortMonth } from '#src/lib/dates/say-date.ts';
+import { useWidth } from '#src/lib/use-width.ts';
 import { channelScale } from './channel-scale.ts';
 
 interface SeasonChannelProps {
@@ -8,21 +9,24 @@ interface SeasonChannelProps {
   readonly now: Date;
 }
 
-const WIDTH = 1240;
+/** The width it is drawn for until it has been measured. */
+const USUAL_WIDTH = 1240;
 /** A month's name gives way where today's words stand. */
 const ROOM_LEFT = 150;
 const ROOM_RIGHT = 70;
 
 /** The season as a channel, filled up to today, with its fights. */
 export function SeasonChannel({ team, next, now }: SeasonChannelProps) {
-  const scale = channelScale(team.season, WIDTH);
+  const [ref, width] = useWidth(USUAL_WIDTH);
+  const scale = channelScale(team.season, width);
   const today = scale.at(now);
   const line = { stroke: 'var(--color-ink-2)', fill: 'none' } as const;
   const isEarly = today < 160;
   const months = scale.months.filter(({ x }) => x > today + ROOM_RIGHT || x < today - ROOM_LEFT);
   return (
     <svg
-      viewBox={`0 0 ${WIDTH} 86`}
+      ref={ref}
+      height="86"
       role="img"
       aria-label={channelSentence(team, next, now)}
       className="w-full text-xs"
@@ -47,7 +51,7 @@ export function SeasonChannel({ team, next, now }: SeasonChannelProps) {
       {team.fights.map((fight) => {
         const x = scale.at(new Date(fight.at));
         const isNext = fight.id === next?.id;
-        const isLate = x > WIDTH - 110;
+        const isLate = x > width - 110;
         const words = { x: isLate ? x - 9 : x + 9, textAnchor: isLate ? 'end' : 'start' } as const;
         return (
           <g key={fight.id}>

@@ -5,7 +5,7 @@ const SPOUT: Spout = { lean: Math.PI / 6, head: 20, height: 9, speedCoefficient:
 const CAN = { width: 8.3, height: 34.8, spout: 4.77 };
 /** Doubt of the speed coefficient, widened so that it can be seen. */
 const SPEED_DOUBT = 0.012;
-const DRAG_PER_CM = 0.0052;
+const DRAG_PER_CM = 0.0074;
 const BREAKS_AT_CM = 14;
 /** Where along the flight readings were taken / cm. */
 const READINGS = [5.3, 11.7, 18, 24.4, 30.2, 35.5, 39.8];
