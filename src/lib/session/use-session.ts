@@ -1,4 +1,5 @@
-import { queryOptions, useQuery } from '@tanstack/react-query';
+import { queryOptions } from '@tanstack/react-query';
+import { createContext, useContext } from 'react';
 import type { Role, Session } from '#shared/contracts/session.ts';
 import { ApiError } from '#src/lib/api/api-error.ts';
 import { getSession } from '#src/lib/api/boot-endpoints.ts';
@@ -26,11 +27,13 @@ export function keepSession(session: Session | null): void {
   rememberSession(session && { userId: session.user.id, email: session.user.email, name: session.user.name });
 }
 
-/** The session of a screen that is shown only to who is signed in. */
+/** The session of everything that is shown only to who is signed in. */
+export const SessionContext = createContext<Session | null>(null);
+
 export function useSession(): Session {
-  const { data } = useQuery(sessionQuery);
-  if (!data) throw new Error('useSession: needs somebody to be signed in');
-  return data;
+  const session = useContext(SessionContext);
+  if (!session) throw new Error('useSession: needs to stand inside the frame of who is signed in');
+  return session;
 }
 
 export function roleIn(session: Session, team: string): Role | null {

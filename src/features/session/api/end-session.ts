@@ -13,7 +13,7 @@ export function useEndSession() {
     onSuccess: () => {
       forgetCsrfToken();
       keepSession(null);
-      client.clear();
+      client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== queryKeys.session[0] });
       client.setQueryData(queryKeys.session, null);
     },
   });
