@@ -33,7 +33,7 @@ export function createCsrf(secret: string): Csrf {
 
 /** A token that outlived its session means that the session ended: that is what the person must hear. */
 function refusal(request: Request): AppError {
-  const isSigningIn = request.path === '/api/session' && request.method === 'POST';
+  const isSigningIn = request.baseUrl + request.path === '/api/session' && request.method === 'POST';
   if (!request.user && !isSigningIn) return notSignedIn();
   return new AppError(
     403,

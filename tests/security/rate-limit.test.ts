@@ -1,0 +1,52 @@
+import { afterEach, beforeEach, expect, test } from 'vitest';
+import { startTestServer } from '#tests/support/server.ts';
+import type { TestServer } from '#tests/support/server.ts';
+
+let app: TestServer;
+beforeEach(async () => {
+  app = await startTestServer({ limits: { minutes: 15, failuresPerAddress: 6, failuresPerAccount: 3 } });
+});
+afterEach(() => app.stop());
+
+const guess = async (email: string) => {
+  const stranger = await app.stranger();
+  return stranger.post('/api/session', { email, passphrase: 'only a guess' });
+};
+
+test('sign in, when one account was guessed at too often: that account is slowed down, even for the right passphrase', async () => {
+  const email = 'ines.farrow@skerry.example';
+  for (const _attempt of [1, 2, 3]) expect((await guess(email)).status).toBe(401);
+
+  const stranger = await app.stranger();
+  const answer = await stranger.post('/api/session', {
+    email: 'INES.Farrow@skerry.example',
+    passphrase: 'tern rock tide table',
+  });
+
+  expect(answer.status).toBe(429);
+  expect(answer.type).toBe('application/problem+json');
+  expect(answer.body).toMatchObject({
+    code: 'too-many-attempts',
+    detail: 'This was tried too often. Wait 15 minutes and try again.',
+  });
+  await app.signIn('kasimir');
+});
+
+test('sign in, when an address guesses at many accounts: the address is slowed down', async () => {
+  for (const n of [1, 2, 3, 4, 5, 6]) expect((await guess(`person${n}@skerry.example`)).status).toBe(401);
+
+  expect((await guess('person7@skerry.example')).status).toBe(429);
+});
+
+test('sign in, when it succeeds again and again: is not counted', async () => {
+  for (const _attempt of [1, 2, 3, 4, 5, 6, 7, 8]) await app.signIn('ines');
+});
+
+test('change passphrase, when the current one is guessed at too often: is slowed down', async () => {
+  const ines = await app.signIn('ines');
+  const attempt = () =>
+    ines.put('/api/account/password', { current: 'only a guess', next: 'four quiet harbour seals' });
+  for (const _attempt of [1, 2, 3]) expect((await attempt()).status).toBe(422);
+
+  expect((await attempt()).status).toBe(429);
+});

@@ -1,0 +1,125 @@
+/** Every route the app has, called as everybody: who may, who may not, and for whom it does not exist. */
+import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import type { Express } from 'express';
+import { startTestServer } from '#tests/support/server.ts';
+import type { SignedIn, TestServer } from '#tests/support/server.ts';
+
+const WHO = ['captain', 'member', 'advisor', 'other team', 'signed out'] as const;
+type Who = (typeof WHO)[number];
+
+/** Ways in which a route may be open; each column is what everybody is answered: yes, or the refusing status. */
+const RIGHTS: Readonly<Record<string, Readonly<Record<Who, 'yes' | 401 | 403 | 404>>>> = {
+  anybody: { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 'yes', 'signed out': 'yes' },
+  'signed in': { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 'yes', 'signed out': 401 },
+  'team reads': { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 404, 'signed out': 401 },
+  'team writes': { captain: 'yes', member: 'yes', advisor: 403, 'other team': 404, 'signed out': 401 },
+  'captain only': { captain: 'yes', member: 403, advisor: 403, 'other team': 404, 'signed out': 401 },
+};
+
+const P = '/api/teams/:team/problems/:number';
+const DEFINITIONS = ['instruments', 'quantities', 'series', 'models', 'comparisons', 'claims', 'charts'];
+
+/** The right of every route. A route that is not here fails the test below. */
+const MATRIX: Readonly<Record<string, string>> = {
+  'GET /api/health': 'anybody',
+  'GET /api/csrf': 'anybody',
+  'POST /api/session': 'anybody',
+  'GET /api/session': 'signed in',
+  'DELETE /api/session': 'signed in',
+  'PUT /api/account/password': 'signed in',
+  'GET /api/teams/:team': 'team reads',
+  'PATCH /api/teams/:team/members/:person': 'captain only',
+  'GET /api/teams/:team/problems': 'team reads',
+  'POST /api/teams/:team/problems': 'team writes',
+  [`GET ${P}`]: 'team reads',
+  [`PATCH ${P}`]: 'team writes',
+  [`GET ${P}/evidence`]: 'team reads',
+  [`GET ${P}/findings`]: 'team reads',
+  ...Object.fromEntries(
+    DEFINITIONS.flatMap((table) => [
+      [`POST ${P}/${table}`, 'team writes'],
+      [`PUT ${P}/${table}/:id`, 'team writes'],
+      [`DELETE ${P}/${table}/:id`, 'team writes'],
+    ]),
+  ),
+  [`POST ${P}/series/:series/trials`]: 'team writes',
+  [`PATCH ${P}/trials/:trial`]: 'team writes',
+};
+
+let app: TestServer;
+const people = new Map<Who, SignedIn>();
+beforeAll(async () => {
+  app = await startTestServer();
+  await signInAll();
+});
+afterAll(() => app.stop());
+
+async function signInAll(): Promise<void> {
+  people.set('captain', await app.signIn('ines'));
+  people.set('member', await app.signIn('kasimir'));
+  people.set('advisor', await app.signIn('odile'));
+  people.set('other team', await app.signIn('sunniva'));
+  people.set('signed out', await app.stranger());
+}
+
+function routesOf(express: Express): string[] {
+  return express.router.stack.flatMap(({ route }) => {
+    if (!route) return [];
+    const methods = route.stack.map(({ method }) => (method ?? '').toUpperCase());
+    return [...new Set(methods)].map((method) => `${method} ${route.path}`);
+  });
+}
+
+/** Calls a route with nothing but its address, which is enough to be let in or refused at the door. */
+async function call(who: Who, route: string): Promise<number> {
+  const person = people.get(who);
+  if (!person) throw new RangeError(`call: needs somebody, got ${who}`);
+  const [method = '', path = ''] = route.split(' ');
+  const address = path
+    .replace(':team', 'tern-rock')
+    .replace(':number', '1')
+    .replace(':person', 'absent')
+    .replaceAll(/:\w+/g, 'absent');
+  switch (method) {
+    case 'GET':
+      return (await person.get(address)).status;
+    case 'POST':
+      return (await person.post(address, {})).status;
+    case 'PUT':
+      return (await person.put(address, {})).status;
+    case 'PATCH':
+      return (await person.patch(address, {})).status;
+    default:
+      return (await person.delete(address, {})).status;
+  }
+}
+
+/** Whoever is let in may still be told that the empty request is no good (422, 428) or that nothing is there (404). */
+const REFUSALS = [401, 403];
+
+describe('role matrix', () => {
+  test('every route of the app, when it is added: is listed with its right', () => {
+    expect(routesOf(app.server.app).sort()).toEqual(Object.keys(MATRIX).sort());
+  });
+
+  const rows = Object.entries(MATRIX).flatMap(([route, right]) => WHO.map((who) => ({ route, right, who })));
+
+  test.each(rows)('$route, as $who: is as "$right" says', async ({ route, right, who }) => {
+    const expected = RIGHTS[right]?.[who];
+
+    const status = await call(who, route);
+    // Signing out and in again changes who somebody is.
+    if (route.endsWith(' /api/session')) await signInAll();
+
+    if (expected === 'yes') expect(REFUSALS).not.toContain(status);
+    else expect(status).toBe(expected);
+    expect(status).toBeLessThan(500);
+  });
+
+  test.each(Object.keys(MATRIX).filter((route) => route.includes(':number')))(
+    '%s, for a problem that the team does not have: answers 404 to its captain',
+    async (route) => {
+      expect(await call('captain', route.replace(':number', '99'))).toBe(404);
+    },
+  );
+});
