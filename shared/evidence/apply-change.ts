@@ -1,4 +1,4 @@
-import type { EvidenceChange } from '#shared/contracts/evidence-changes.ts';
+import type { EvidenceChange } from './evidence-change.ts';
 import type { Evidence } from './evidence.ts';
 
 interface Row {
