@@ -56,9 +56,10 @@ async function send(endpoint: Callable, options: SendOptions): Promise<Response>
   const { body } = options;
   if (body !== undefined && !(body instanceof FormData)) headers.set('content-type', 'application/json');
   if (options.ifMatch !== undefined) headers.set('if-match', `"${options.ifMatch}"`);
+  const address = addressOf(endpoint.path, options.params);
   try {
     if (endpoint.method !== 'GET') headers.set('x-csrf-token', await csrfToken());
-    return await fetch(addressOf(endpoint.path, options.params), {
+    return await fetch(address, {
       method: endpoint.method,
       headers,
       credentials: 'same-origin',

@@ -5,6 +5,9 @@ import { createMemoryRouter } from 'react-router-dom';
 import { Providers } from '#src/app/providers.tsx';
 import { routes } from '#src/router.tsx';
 
+// jsdom does not scroll.
+Object.assign(window, { scrollTo: () => undefined });
+
 /** Opens an address of the product, with its real router and a query client of its own. */
 export function renderAt(address: string) {
   const client = new QueryClient({
