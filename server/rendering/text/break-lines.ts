@@ -125,7 +125,9 @@ function stretchRatio(
     return shrink > 0 && -slack <= shrink + ROUNDING ? slack / shrink : -Infinity;
   }
   const stretch = between(sums.stretch) + (rules.raggedness ?? 0);
-  return stretch > 0 ? slack / stretch : Infinity;
+  if (stretch > 0) return slack / stretch;
+  // A word alone cannot be stretched; where anything goes it may stand short.
+  return rules.tolerance < OVERFULL_FROM ? Infinity : OVERFULL_FROM;
 }
 
 function fitnessOf(ratio: number): number {

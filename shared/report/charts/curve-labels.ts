@@ -74,10 +74,9 @@ function labelsOf(scene: ComparisonScene, theme: ChartTheme, place: ChartPlace):
       candidates: alongCurve(scene, place),
     });
   }
-  for (const series of scene.series) {
-    const which = scene.series.length > 1 ? `, series ${series.letter}` : '';
+  scene.series.forEach((series, nth) => {
     labels.push({
-      runs: [plain(`measured${which}${scene.means ? ', mean ± ' : ', ± '}`), ...kTimesU(scene.k)],
+      runs: nth === 0 ? firstSeriesRuns(scene, series.letter) : [plain(`series ${series.letter}`)],
       style: word(theme.water),
       candidates: (width) =>
         series.points.flatMap((point, i) =>
@@ -87,8 +86,14 @@ function labelsOf(scene: ComparisonScene, theme: ChartTheme, place: ChartPlace):
           })),
         ),
     });
-  }
+  });
   return labels;
+}
+
+/** The first series' label says how points and bars are to be read; further ones need only their name. */
+function firstSeriesRuns(scene: ComparisonScene, letter: string): TextRun[] {
+  const which = scene.series.length > 1 ? `, series ${letter}` : '';
+  return [plain(`measured${which}${scene.means ? ', mean ± ' : ', ± '}`), ...kTimesU(scene.k)];
 }
 
 function kTimesU(k: number): TextRun[] {
@@ -127,6 +132,8 @@ function besidePoint(x: number, y: number, width: number, gap: number): LabelCan
     { box: boxAt(x - gap - width, y + 4, width), cost: 3 },
     { box: boxAt(x - width / 2, y + ASCENT + gap + 4, width), cost: 4 },
     { box: boxAt(x - width / 2, y - gap - DESCENT - 2, width), cost: 5 },
+    { box: boxAt(x - width / 2, y + ASCENT + 2 * gap, width), cost: 6 },
+    { box: boxAt(x - width / 2, y - 2 * gap - DESCENT, width), cost: 7 },
   ];
 }
 

@@ -1,16 +1,13 @@
-import type { Evidence, UncertaintyPart } from '#shared/evidence/evidence.ts';
+import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { ComparisonPoint } from '#shared/evidence/findings.ts';
-import { uncertaintyToSi } from '#shared/units/convert.ts';
-import { parseUnit } from '#shared/units/parse-unit.ts';
+import { statedParts } from '#shared/evidence/instrument-parts.ts';
+import { norm } from '#shared/numeric/norm.ts';
 import { readSi } from '#shared/units/reading.ts';
 
-/** Divisors that turn a half-width into a standard uncertainty, JCGM 100:2008, 4.3.7 to 4.3.9 and F.2.2.1. */
-const DIVISOR = { rectangular: Math.sqrt(3), triangular: Math.sqrt(6), arcsine: Math.SQRT2 } as const;
-const RESOLUTION_DIVISOR = Math.sqrt(12);
-
 /**
- * Standard uncertainty of one setting of a compared point: what its reading states, else the instrument's parts.
- * It is drawn as the point's horizontal bar; the sums behind verdicts are made elsewhere, by source.
+ * Standard uncertainty of one setting of a compared point: what its reading states in the place of the instrument's
+ * own parts, together with the instrument's other parts. It is drawn as the point's horizontal bar; the sums behind
+ * verdicts are made elsewhere, source by source.
  *
  * @param point - the point; its settings hold the readings
  * @param quantity - id of the setting
@@ -22,28 +19,17 @@ export function settingUncertainty(
   evidence: Evidence,
 ): number | null {
   const reading = point.settings[quantity];
-  if (!reading) return null;
-  const read = readSi(reading);
-  if (!read.ok) return null;
-  if (read.u !== null) return read.u;
-  const def = evidence.quantities.find((row) => row.id === quantity)?.def;
-  const instrumentId = def?.origin === 'recorded' ? def.instrument : null;
-  const instrument = evidence.instruments.find((row) => row.id === instrumentId);
-  if (!instrument || instrument.parts.length === 0) return null;
-  const parts = instrument.parts.map((part) => partInSi(part, read.value));
-  return Math.hypot(...parts.map((u) => u ?? 0));
-}
-
-function partInSi(part: UncertaintyPart, value: number): number | null {
-  const amount = Number(part.amount.replace(',', '.'));
-  if (!Number.isFinite(amount)) return null;
-  const divisor =
-    part.kind === 'resolution' && part.shape === 'rectangular'
-      ? RESOLUTION_DIVISOR
-      : part.shape === 'normal'
-        ? (part.k ?? 1)
-        : DIVISOR[part.shape];
-  if (part.kind === 'scale') return Math.abs((amount / divisor) * value);
-  const unit = parseUnit(part.unit);
-  return unit.ok ? uncertaintyToSi(amount / divisor, unit.unit) : null;
+  const read = reading && readSi(reading);
+  if (!read?.ok) return null;
+  const row = evidence.quantities.find((one) => one.id === quantity);
+  const instrumentId = row?.def.origin === 'recorded' ? row.def.instrument : null;
+  const instrument = evidence.instruments.find((one) => one.id === instrumentId);
+  if (!row || !instrument || instrument.parts.length === 0) return read.u;
+  const owner = { words: instrument.name, at: instrument.id, symbol: row.symbol, unit: read.unit };
+  const parts = statedParts(instrument.parts, owner);
+  if ('shape' in parts) return read.u;
+  const amounts = parts
+    .filter((part) => read.u === null || part.shared)
+    .map((part) => (part.relative ? part.amount * read.value : part.amount));
+  return norm(Float64Array.from(read.u === null ? amounts : [...amounts, read.u]));
 }
