@@ -66,9 +66,4 @@ export interface TooFewObservations {
 }
 
 /** How a fit ended. Only 'converged' carries a covariance. */
-export type FitOutcome =
-  | ConvergedFit
-  | UndeterminedFit
-  | UnconvergedFit
-  | NotFiniteFit
-  | TooFewObservations;
+export type FitOutcome = ConvergedFit | UndeterminedFit | UnconvergedFit | NotFiniteFit | TooFewObservations;

@@ -28,6 +28,35 @@ export interface LeastSquaresProblem {
 
 /** Options of a fit. */
 export interface FitOptions {
-  /** Most evaluations of the residuals before the search gives up. Default 2000. */
+  /** Most evaluations of the residuals before the search gives up, ≥ 1. Default 2000. */
   readonly maxEvaluations?: number | undefined;
+}
+
+/** Default of FitOptions.maxEvaluations: the hardest NIST set from its far start needs about 700. */
+const MAX_EVALUATIONS = 2000;
+
+/**
+ * Refuses a problem that no data could mend; gives the options with their defaults.
+ *
+ * @throws RangeError when a count, start, bound or option is not usable
+ */
+export function checkProblem(problem: LeastSquaresProblem, options: FitOptions): { maxEvaluations: number } {
+  const { observations, parameters } = problem;
+  if (!Number.isInteger(observations) || observations < 1)
+    throw new RangeError(`fitLeastSquares: needs at least 1 observation, got ${observations}`);
+  if (parameters.length === 0) throw new RangeError('fitLeastSquares: needs at least 1 parameter, got 0');
+  parameters.forEach(({ start, min = -Infinity, max = Infinity }, index) => {
+    if (!Number.isFinite(start))
+      throw new RangeError(`fitLeastSquares: needs finite starts, got ${start} for parameter ${index}`);
+    if (!(min < max))
+      throw new RangeError(`fitLeastSquares: needs min < max, got ${min} and ${max} for parameter ${index}`);
+    if (!(start >= min && start <= max))
+      throw new RangeError(
+        `fitLeastSquares: needs a start within ${min} and ${max}, got ${start} for parameter ${index}`,
+      );
+  });
+  const maxEvaluations = options.maxEvaluations ?? MAX_EVALUATIONS;
+  if (!(maxEvaluations >= 1))
+    throw new RangeError(`fitLeastSquares: needs maxEvaluations ≥ 1, got ${maxEvaluations}`);
+  return { maxEvaluations };
 }
