@@ -5,8 +5,10 @@ import { notFound } from './errors/refusals.ts';
 import { problemJson } from './errors/problem-json.ts';
 import { mountAccount } from './features/account/routes.ts';
 import { mountEvidence } from './features/evidence/routes.ts';
+import { mountExports } from './features/exports/routes.ts';
 import { mountHealth } from './features/health/routes.ts';
 import { mountProblems } from './features/problems/routes.ts';
+import { mountReport } from './features/report/routes.ts';
 import { mountSession } from './features/session/routes.ts';
 import { mountTeams } from './features/teams/routes.ts';
 import { mountTrials } from './features/trials/routes.ts';
@@ -38,6 +40,8 @@ export function createApp(deps: ServerDeps): Express {
   mountProblems(app, deps);
   mountEvidence(app, deps);
   mountTrials(app, deps);
+  mountReport(app, deps);
+  mountExports(app, deps);
 
   app.use('/api', () => {
     throw notFound();

@@ -6,6 +6,8 @@ import path from 'node:path';
 import type { Express } from 'express';
 import type { Logger } from 'pino';
 import { createApp } from './app.ts';
+import { attachCollaboration } from './collaboration/attach-collaboration.ts';
+import type { Collaboration } from './collaboration/attach-collaboration.ts';
 import { serveBuiltClient, serveLiveClient } from './client.ts';
 import type { ServedClient } from './client.ts';
 import type { Environment } from './config/environment.ts';
@@ -24,6 +26,7 @@ import { clearExpiredSessions } from './features/session/service.ts';
 import { createCsrf } from './middleware/csrf.ts';
 import { DEFAULT_LIMITS } from './middleware/rate-limits.ts';
 import type { Limits } from './middleware/rate-limits.ts';
+import { createReportRenderer } from './rendering/report-renderer.ts';
 import { OpenSockets } from './sockets/open-sockets.ts';
 import { attachSocketUpgrades } from './sockets/socket-upgrades.ts';
 
@@ -53,12 +56,13 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
   server.on('request', app);
   const upgrades = attachSocketUpgrades(server, { ...deps, findActor: deps.session.findActor });
   attachEventStream(upgrades, deps);
+  const collaboration = attachCollaboration(upgrades, deps);
   const port = await listen(server, environment);
   return {
     url: `http://${environment.host.includes(':') ? `[${environment.host}]` : environment.host}:${port}`,
     app,
     deps,
-    close: () => closeAll(server, client, deps),
+    close: () => closeAll(server, client, collaboration, deps),
   };
 }
 
@@ -82,7 +86,8 @@ async function createDeps(
     sockets: new OpenSockets(),
     events: new EventHub(),
     evidenceCache: createEvidenceCache(),
-    evaluation: createEvaluation(),
+    evaluation: createEvaluation(logger),
+    renderer: createReportRenderer(),
     client: client?.handler ?? null,
   };
 }
@@ -110,7 +115,12 @@ function listen(server: Server, { host, port }: Environment): Promise<number> {
 
 const GRACE_MS = 1_000;
 
-async function closeAll(server: Server, client: ServedClient | null, deps: ServerDeps): Promise<void> {
+async function closeAll(
+  server: Server,
+  client: ServedClient | null,
+  collaboration: Collaboration,
+  deps: ServerDeps,
+): Promise<void> {
   const closed = new Promise<void>((resolve) => server.close(() => resolve()));
   deps.sockets.closeAll();
   server.closeIdleConnections();
@@ -121,6 +131,8 @@ async function closeAll(server: Server, client: ServedClient | null, deps: Serve
   await closed;
   clearTimeout(impatience);
   await client?.close();
+  await collaboration.close();
   await deps.evaluation.close();
+  await deps.renderer.close();
   await deps.database.close();
 }

@@ -3,6 +3,7 @@ import type { Sequelize } from 'sequelize';
 import { defineUsers } from '#server/features/account/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
+import { defineReportDocs, defineReportUpdates } from '#server/features/report/model.ts';
 import { defineSessions } from '#server/features/session/model.ts';
 import { defineFights, defineMemberships, defineTeams } from '#server/features/teams/model.ts';
 import { defineTrials } from '#server/features/trials/model.ts';
@@ -21,5 +22,7 @@ export function defineModels(sequelize: Sequelize) {
     definitions: defineAllDefinitions(sequelize),
     trials: defineTrials(sequelize),
     auditEvents: defineAuditEvents(sequelize),
+    reportDocs: defineReportDocs(sequelize),
+    reportUpdates: defineReportUpdates(sequelize),
   };
 }
