@@ -6,6 +6,7 @@ import { problemJson } from './errors/problem-json.ts';
 import { mountAccount } from './features/account/routes.ts';
 import { mountEvidence } from './features/evidence/routes.ts';
 import { mountExports } from './features/exports/routes.ts';
+import { mountFiles } from './features/files/routes.ts';
 import { mountHealth } from './features/health/routes.ts';
 import { mountProblems } from './features/problems/routes.ts';
 import { mountReport } from './features/report/routes.ts';
@@ -41,6 +42,7 @@ export function createApp(deps: ServerDeps): Express {
   mountEvidence(app, deps);
   mountTrials(app, deps);
   mountReport(app, deps);
+  mountFiles(app, deps);
   mountExports(app, deps);
 
   app.use('/api', () => {

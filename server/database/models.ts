@@ -2,6 +2,7 @@
 import type { Sequelize } from 'sequelize';
 import { defineUsers } from '#server/features/account/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
+import { defineFiles } from '#server/features/files/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
 import { defineReportDocs, defineReportUpdates } from '#server/features/report/model.ts';
 import { defineSessions } from '#server/features/session/model.ts';
@@ -23,6 +24,7 @@ export function defineModels(sequelize: Sequelize) {
     trials: defineTrials(sequelize),
     auditEvents: defineAuditEvents(sequelize),
     reportDocs: defineReportDocs(sequelize),
+    files: defineFiles(sequelize),
     reportUpdates: defineReportUpdates(sequelize),
   };
 }
