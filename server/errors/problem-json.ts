@@ -3,6 +3,7 @@ import type { ErrorRequestHandler } from 'express';
 import type { Logger } from 'pino';
 import type { ProblemDetails } from '#shared/contracts/problem-details.ts';
 import { AppError } from './app-error.ts';
+import { notFound } from './refusals.ts';
 
 /** Answers every error as application/problem+json. What is not an AppError is a bug: logged whole, told as a bare 500. */
 export function problemJson(logger: Logger): ErrorRequestHandler {
@@ -40,8 +41,8 @@ function fromLibrary(error: unknown): AppError | null {
   if ('code' in error && typeof error.code === 'string' && error.code.startsWith('LIMIT_')) {
     return new AppError(400, 'not-one-file', 'Send one file, in the field named file.', { cause: error });
   }
-  if (error instanceof URIError) return new AppError(404, 'not-found', 'There is nothing at this address.');
   const status = 'status' in error ? error.status : undefined;
+  if (error instanceof URIError || status === 404) return notFound();
   if (typeof status === 'number' && status >= 400 && status < 500) {
     return new AppError(status, 'bad-request', 'The request cannot be read.', { cause: error });
   }

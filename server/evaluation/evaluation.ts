@@ -1,8 +1,8 @@
 import { Piscina } from 'piscina';
+import type { Logger } from 'pino';
 import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { Findings } from '#shared/evidence/findings.ts';
 import { workerFile } from '#server/config/worker-file.ts';
-import type { EvaluationTask } from './evaluation-worker.ts';
 
 export interface Evaluation {
   /** Findings of a problem's evidence. Asked twice for the same version, computed once. */
@@ -18,26 +18,20 @@ interface Held {
 const MAX_HELD = 40;
 
 /** evaluate() in worker threads, so that a long evaluation never holds up a request. Threads start when first needed. */
-export function createEvaluation(): Evaluation {
+export function createEvaluation(logger: Logger): Evaluation {
   const held = new Map<string, Held>();
   let pool: Piscina | null = null;
 
-  const compute = (task: EvaluationTask): Promise<Findings> => {
-    pool ??= new Piscina({
-      ...workerFile(import.meta.url, 'evaluation/evaluation-worker.ts'),
-      name: 'evaluateInWorker',
-      minThreads: 0,
-      maxThreads: 2,
-      idleTimeout: 60_000,
-    });
-    return pool.run(task) as Promise<Findings>;
+  const compute = (evidence: Evidence): Promise<Findings> => {
+    pool ??= createPool(logger);
+    return pool.run(evidence) as Promise<Findings>;
   };
 
   return {
     getFindings(problemId, evidence) {
       const before = held.get(problemId);
       if (before?.version === evidence.version) return before.findings;
-      const findings = compute({ problemId, evidence });
+      const findings = compute(evidence);
       const entry = { version: evidence.version, findings };
       held.delete(problemId);
       held.set(problemId, entry);
@@ -52,4 +46,17 @@ export function createEvaluation(): Evaluation {
       await pool?.close();
     },
   };
+}
+
+function createPool(logger: Logger): Piscina {
+  const pool = new Piscina({
+    ...workerFile(import.meta.url, 'evaluation/evaluation-worker.ts'),
+    name: 'evaluateInWorker',
+    minThreads: 0,
+    maxThreads: 2,
+    idleTimeout: 60_000,
+  });
+  // A thread that dies fails its task; without a listener it would take the server with it.
+  pool.on('error', (error: unknown) => logger.error({ err: error }, 'an evaluation thread failed'));
+  return pool;
 }
