@@ -1,24 +1,24 @@
-import { useSyncExternalStore, type ReactNode } from 'react';
-import { eventStream } from '#src/lib/events/stream.ts';
-import { useStore } from '#src/lib/store/use-store.ts';
+import type { ReactNode } from 'react';
+import { useConnection } from './use-connection.ts';
 
-function subscribeToNetwork(listener: () => void): () => void {
-  window.addEventListener('online', listener);
-  window.addEventListener('offline', listener);
-  return () => {
-    window.removeEventListener('online', listener);
-    window.removeEventListener('offline', listener);
-  };
-}
-
-/** Why the server is out of reach, in words; otherwise what stands here usually. */
+/** That the server is out of reach; otherwise what stands here usually. */
 export function ConnectionWords({ children }: { readonly children: ReactNode }) {
-  const isDown = useStore(eventStream().state) === 'down';
-  const isOnline = useSyncExternalStore(subscribeToNetwork, () => navigator.onLine);
-  const words = !isOnline ? 'No network.' : 'Server not reached.';
+  const sentence = useConnection();
   return (
     <span role="status">
-      {isDown || !isOnline ? <span className="late text-ink">{words} Trying again.</span> : children}
+      {sentence === null ? children : <span className="late text-ink">{sentence}</span>}
     </span>
+  );
+}
+
+/** The same on a phone, where the top line has no room: under it, and only when there is something to say. */
+export function PhoneConnection() {
+  const sentence = useConnection();
+  return (
+    <div role="status" className="sm:hidden">
+      {sentence !== null && (
+        <p className="late border-b border-rule bg-sill py-1.5 pr-32 pl-4.5 text-xs">{sentence}</p>
+      )}
+    </div>
   );
 }

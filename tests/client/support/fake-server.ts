@@ -14,7 +14,10 @@ type Handler = (asked: Asked) => Answer;
 
 export interface FakeServer {
   /** Answers `GET /api/team` from now on; the last word for a place counts. */
-  on(place: string, answer: unknown | Handler): void;
+  readonly on: {
+    (place: string, handler: Handler): void;
+    (place: string, body: object): void;
+  };
   /** What was asked of a place, in order. */
   asked(place: string): readonly Asked[];
   /** As if the network were gone. */
@@ -113,8 +116,8 @@ export function fakeServer(): FakeServer {
   );
 
   const server: FakeServer = {
-    on(place, answer) {
-      answers.set(place, typeof answer === 'function' ? (answer as Handler) : () => json(answer));
+    on(place: string, answer: Handler | object) {
+      answers.set(place, isHandler(answer) ? answer : () => json(answer));
     },
     asked: (place) => all.filter((entry) => entry.place === place).map(({ asked }) => asked),
     setReachable(next) {
@@ -124,4 +127,8 @@ export function fakeServer(): FakeServer {
   };
   server.on('GET /api/csrf', { token: 'token-1' });
   return server;
+}
+
+function isHandler(answer: Handler | object): answer is Handler {
+  return typeof answer === 'function';
 }

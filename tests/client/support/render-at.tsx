@@ -1,9 +1,12 @@
-import { render } from '@testing-library/react';
+import { configure, render } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { QueryClient } from '@tanstack/react-query';
 import { createMemoryRouter } from 'react-router-dom';
 import { Providers } from '#src/app/providers.tsx';
 import { routes } from '#src/router.tsx';
+
+// A screen is a file of its own, and reading the first of them takes a while.
+configure({ asyncUtilTimeout: 10_000 });
 
 // jsdom does not scroll.
 Object.assign(window, { scrollTo: () => undefined });
