@@ -7,7 +7,7 @@ export interface SymbolParts {
   readonly sub: string | null;
 }
 
-const FORM = /^(\p{L}+)(?:_(?:\{([\p{L}\p{N},]+)\}|([\p{L}\p{N}]+)))?$/u;
+const FORM = /^(\p{L}+)(?:_(?:\{([\p{L}\p{Nd},]+)\}|([\p{L}\p{Nd}]+)))?$/u;
 
 /**
  * Letter and subscript of a symbol: one letter, or a Greek letter by sign or name, then an optional `_sub`.
@@ -55,7 +55,7 @@ export function sameSymbol(a: string, b: string): boolean {
  */
 export function symbolToLatex(symbol: string): string {
   const parts = splitSymbol(symbol);
-  if (parts === null) return `\\mathit{${symbol.replace(/[^\p{L}\p{N} ]/gu, '')}}`;
+  if (parts === null) return `\\mathit{${symbol.replace(/[^\p{L}\p{Nd} ]/gu, '')}}`;
   const letter = findGreekLetter(parts.letter)?.latex ?? parts.letter;
   return parts.sub === null ? letter : `${letter}_{${subscript(parts.sub)}}`;
 }
@@ -91,7 +91,7 @@ export function symbolFault(symbol: string): string | null {
       ? 'π is kept for the number 3.14159…. Choose another letter, or add a label: π_1.'
       : null;
   }
-  const word = /^(\p{L})[_ ]?([\p{L}\p{N}]+)$/u.exec(trimmed);
+  const word = /^(\p{L})[_ ]?([\p{L}\p{Nd}]+)$/u.exec(trimmed);
   const mend =
     word === null ? 'Write it like v, v_t or θ_0.' : `Write ${word[1]}_${word[2]} or choose another letter.`;
   return `A symbol is one letter, then perhaps _ and a label. ${mend}`;
