@@ -9,7 +9,7 @@ interface DialogProps {
   readonly title: ReactNode;
   /** The consequence, in numbers where there are any. */
   readonly sentence?: ReactNode;
-  /** The safe choice first, then the other. */
+  /** The safe choice first, then the other; null where the content has them. */
   readonly actions: ReactNode;
   readonly children?: ReactNode;
 }
@@ -29,7 +29,9 @@ export function Dialog({ open, onClose, title, sentence, actions, children }: Di
             <Radix.Description className="mb-3.5 text-sm/[21px] text-ink-2">{sentence}</Radix.Description>
           )}
           {children}
-          <div className="mt-4.5 flex flex-wrap items-center justify-end gap-2.5">{actions}</div>
+          {actions !== null && (
+            <div className="mt-4.5 flex flex-wrap items-center justify-end gap-2.5">{actions}</div>
+          )}
         </Radix.Content>
       </Radix.Portal>
     </Radix.Root>

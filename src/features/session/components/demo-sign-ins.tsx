@@ -12,7 +12,7 @@ export function DemoSignIns({ onSignedIn }: { readonly onSignedIn: () => void })
   if (!data?.demo || data.demo.length === 0) return null;
   return (
     <section aria-label="Demonstration" className="text-sm/[22px] text-ink-2">
-      <p>This installation shows a team invented for demonstration. Look at it as</p>
+      <p>This installation shows what was invented for demonstration. Look at it as</p>
       <ul className="mt-1 flex flex-wrap gap-x-4 gap-y-1.5">
         {data.demo.map(({ name, email, passphrase, role }) => (
           <li key={email} className="whitespace-nowrap">
