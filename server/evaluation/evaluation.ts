@@ -16,6 +16,8 @@ interface Held {
 }
 
 const MAX_HELD = 40;
+/** The largest problem takes about a second; what takes this long is stopped, thread and all. */
+const MAX_MS = 60_000;
 
 /** evaluate() in worker threads, so that a long evaluation never holds up a request. Threads start when first needed. */
 export function createEvaluation(logger: Logger): Evaluation {
@@ -24,7 +26,7 @@ export function createEvaluation(logger: Logger): Evaluation {
 
   const compute = (evidence: Evidence): Promise<Findings> => {
     pool ??= createPool(logger);
-    return pool.run(evidence) as Promise<Findings>;
+    return pool.run(evidence, { signal: AbortSignal.timeout(MAX_MS) }) as Promise<Findings>;
   };
 
   return {

@@ -44,6 +44,14 @@ const MATRIX: Readonly<Record<string, string>> = {
   ),
   [`POST ${P}/series/:series/trials`]: 'team writes',
   [`PATCH ${P}/trials/:trial`]: 'team writes',
+  [`GET ${P}/report`]: 'team reads',
+  [`GET ${P}/report.pdf`]: 'team reads',
+  [`POST ${P}/files`]: 'team writes',
+  [`GET ${P}/files/:sha`]: 'team reads',
+  [`POST ${P}/exports`]: 'team reads',
+  [`GET ${P}/exports/:export`]: 'team reads',
+  [`DELETE ${P}/exports/:export`]: 'team reads',
+  [`GET ${P}/exports/:export/file`]: 'team reads',
 };
 
 let app: TestServer;
