@@ -58,12 +58,24 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
   attachEventStream(upgrades, deps);
   const collaboration = attachCollaboration(upgrades, deps);
   const port = await listen(server, environment);
+  const clearing = setInterval(() => clearSessions(deps), HOUR_MS);
   return {
     url: `http://${environment.host.includes(':') ? `[${environment.host}]` : environment.host}:${port}`,
     app,
     deps,
-    close: () => closeAll(server, client, collaboration, deps),
+    close: () => {
+      clearInterval(clearing);
+      return closeAll(server, client, collaboration, deps);
+    },
   };
+}
+
+const HOUR_MS = 3_600_000;
+
+function clearSessions({ database, now, logger }: ServerDeps): void {
+  clearExpiredSessions(database, now()).catch((error: unknown) => {
+    logger.error({ err: error }, 'expired sessions were not cleared');
+  });
 }
 
 async function createDeps(
@@ -80,7 +92,7 @@ async function createDeps(
     database,
     logger,
     now,
-    session: createSessionLayer(database, secret),
+    session: createSessionLayer(database, secret, now),
     csrf: createCsrf(secret),
     limits: limits ?? DEFAULT_LIMITS,
     sockets: new OpenSockets(),

@@ -9,6 +9,8 @@ export interface Csrf {
   issue(request: Request, response: Response): string;
 }
 
+const STRANGER_MS = 2 * 3_600_000;
+
 /** Double submit: a token bound to the session by HMAC, in an httpOnly cookie and in the header x-csrf-token. */
 export function createCsrf(secret: string): Csrf {
   const { doubleCsrfProtection, generateCsrfToken, invalidCsrfTokenError } = doubleCsrf({
@@ -26,6 +28,8 @@ export function createCsrf(secret: string): Csrf {
     },
     issue(request, response) {
       request.session.csrf = true;
+      // Until somebody signs in, which makes a new session, this one need not be kept for long.
+      if (!request.user) request.session.cookie.maxAge = STRANGER_MS;
       return generateCsrfToken(request, response, { overwrite: false, validateOnReuse: false });
     },
   };

@@ -1,7 +1,8 @@
 import { afterAll, beforeAll, expect, test } from 'vitest';
 import request from 'supertest';
-import { startTestServer } from '#tests/support/server.ts';
-import type { TestServer } from '#tests/support/server.ts';
+import { clearExpiredSessions } from '#server/features/session/service.ts';
+import { FIRST_START, startTestServer } from '#tests/support/server.ts';
+import type { SignedIn, TestServer } from '#tests/support/server.ts';
 
 let app: TestServer;
 beforeAll(async () => {
@@ -112,3 +113,34 @@ test('a disabled person, when their session is still open: is signed out', async
 
   expect((await kasimir.get('/api/session')).status).toBe(401);
 });
+
+test('session, when a fortnight has passed: is over', async () => {
+  const maren = await app.signIn('maren');
+  const later = new Date(Date.now() + 14 * 86_400_000 + 1000);
+
+  app.setNow(later);
+  const answer = await maren.get('/api/session');
+
+  expect(answer.status).toBe(401);
+  app.setNow(FIRST_START);
+});
+
+test('session of a stranger, when nobody signs in within two hours: is cleared away, those signed in stay', async () => {
+  const { database } = app.server.deps;
+  const stranger = await app.stranger();
+  const ines = await app.signIn('ines');
+  const isThere = async ({ cookie }: SignedIn) =>
+    (await database.models.sessions.count({ where: { sid: sessionId(cookie) } })) === 1;
+  const before = [await isThere(stranger), await isThere(ines)];
+
+  await clearExpiredSessions(database, new Date(Date.now() + 2 * 3_600_000 + 1000));
+
+  expect(before).toEqual([true, true]);
+  expect([await isThere(stranger), await isThere(ines)]).toEqual([false, true]);
+});
+
+/** The id inside a signed session cookie. */
+function sessionId(cookie: string): string {
+  const signed = decodeURIComponent(/holdwater=([^;]+)/.exec(cookie)?.[1] ?? '');
+  return signed.slice('s:'.length, signed.lastIndexOf('.'));
+}

@@ -21,7 +21,7 @@ export interface SessionLayer {
 const DAY = 86_400_000;
 
 /** Cookie sessions kept in the database, and passport on top of them. */
-export function createSessionLayer(database: Database, secret: string): SessionLayer {
+export function createSessionLayer(database: Database, secret: string, now: () => Date): SessionLayer {
   const passport = new Passport();
   passport.use(
     new Strategy({ usernameField: 'email', passwordField: 'passphrase' }, (email, passphrase, done) => {
@@ -41,7 +41,7 @@ export function createSessionLayer(database: Database, secret: string): SessionL
   const sessions = session({
     name: 'holdwater',
     secret,
-    store: createSessionStore(database),
+    store: createSessionStore(database, now),
     resave: false,
     saveUninitialized: false,
     cookie: { httpOnly: true, sameSite: 'lax', secure: 'auto', maxAge: 14 * DAY },

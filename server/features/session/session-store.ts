@@ -10,8 +10,9 @@ const SequelizeStore = createStoreClass(session.Store);
 /** Sessions in the database. Their writes wait their turn among all writers, or they would block the thread pool. */
 class QueuedSessionStore extends SequelizeStore {
   readonly #database: Database;
+  readonly #now: () => Date;
 
-  constructor(database: Database) {
+  constructor(database: Database, now: () => Date) {
     super({
       db: database.sequelize,
       table: 'sessions',
@@ -23,6 +24,16 @@ class QueuedSessionStore extends SequelizeStore {
       }),
     } as ConstructorParameters<typeof SequelizeStore>[0]);
     this.#database = database;
+    this.#now = now;
+  }
+
+  /** A session whose time is over is none, even before it is cleared away. */
+  override get(sid: string, done: (error: unknown, data?: SessionData | null) => void): void {
+    super.get(sid, (error: unknown, data?: SessionData | null) => {
+      const expires = data?.cookie.expires;
+      const isOver = expires !== undefined && expires !== null && new Date(expires) <= this.#now();
+      done(error, isOver ? null : data);
+    });
   }
 
   override set(sid: string, data: SessionData, done: Done = () => undefined): void {
@@ -48,6 +59,6 @@ class QueuedSessionStore extends SequelizeStore {
   }
 }
 
-export function createSessionStore(database: Database): session.Store {
-  return new QueuedSessionStore(database);
+export function createSessionStore(database: Database, now: () => Date): session.Store {
+  return new QueuedSessionStore(database, now);
 }
