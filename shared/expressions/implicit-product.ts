@@ -30,7 +30,8 @@ export function implicitProduct(before: Operand, after: Follower, shown: string)
   const typed = shown.slice(span.from, span.to);
   const left = shown.slice(before.span.from, before.span.to);
   const right = shown.slice(after.span.from, after.span.to);
-  if (after.kind === 'bar')
+  const opensBar = before.kind === 'number' && !before.isDivisor && !before.isExponent;
+  if (after.kind === 'bar' && !opensBar)
     return ambiguous(span, `Write |…| as abs(…), so that “${typed}” has one reading.`);
   if (after.kind === 'number') {
     return before.kind === 'number'
