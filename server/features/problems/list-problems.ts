@@ -1,13 +1,14 @@
 import type { Fight, ProblemSummary } from '#shared/contracts/teams.ts';
-import { sectionNameSchema } from '#shared/contracts/teams.ts';
+import type { ServerDeps } from '#server/deps.ts';
 import { getEvidence } from '#server/features/evidence/service.ts';
-import type { EvidenceDeps } from '#server/features/evidence/service.ts';
+import { documentOf } from '#server/features/report/service.ts';
 import { listFights, listPeople } from '#server/features/teams/service.ts';
 import type { TeamPlace } from '#server/features/teams/service.ts';
 import { ownersAmong } from './service.ts';
+import { summariseProblem } from './summarise-problem.ts';
 
 /** The team's problems by number, each with how far it has come. */
-export async function listProblems(deps: EvidenceDeps, place: TeamPlace): Promise<ProblemSummary[]> {
+export async function listProblems(deps: ServerDeps, place: TeamPlace): Promise<ProblemSummary[]> {
   const { database } = deps;
   const rows = await database.models.problems.findAll({
     where: { teamId: place.team.id },
@@ -20,16 +21,15 @@ export async function listProblems(deps: EvidenceDeps, place: TeamPlace): Promis
   return Promise.all(
     rows.map(async (row) => {
       const { evidence } = await getEvidence(deps, row.id);
+      const { document } = await documentOf(database, row.id, deps.now());
+      const findings = await deps.evaluation.getFindings(row.id, evidence);
       return {
         number: row.number,
         title: row.title,
         statement: row.statement,
         owners: ownersAmong(people, row.owners),
         stage: next?.stages.find(({ problem }) => problem === row.number)?.role ?? null,
-        levels: sectionNameSchema.options.map((section) => ({ section, level: 'Blank' as const })),
-        claims: { holds: 0, leaks: 0, undecided: evidence.claims.length },
-        trials: evidence.trials.filter(({ withdrawn }) => !withdrawn).length,
-        notTied: 0,
+        ...summariseProblem(document, evidence, findings),
       };
     }),
   );

@@ -1,6 +1,12 @@
 /** The invented problems of Team Tern Rock: what was asked, in whose hands, with what evidence. */
 import type { Evidence, ProblemSettings } from '#shared/evidence/evidence.ts';
-import { draftSpoutEvidence } from './draft-spout-evidence.ts';
+import type { ReportDocument } from '#shared/report/schema/report-node.ts';
+import { brakedMagnetEvidence } from './braked-magnet-evidence.ts';
+import { brakedMagnetReport } from './braked-magnet-report.ts';
+import { fallingCupsEvidence } from './falling-cups-evidence.ts';
+import { fallingCupsReport } from './falling-cups-report.ts';
+import { leaningSpoutEvidence } from './leaning-spout-evidence.ts';
+import { leaningSpoutReport } from './leaning-spout-report.ts';
 
 export interface DemoProblem {
   readonly number: number;
@@ -10,12 +16,20 @@ export interface DemoProblem {
   readonly tasks: readonly { readonly id: string; readonly text: string }[];
   /** Ids of people. */
   readonly owners: readonly string[];
-  readonly settings: ProblemSettings;
-  /** Evidence as it stands at the first start; null: nothing entered yet. */
-  readonly evidence: ((firstStart: Date) => Evidence) | null;
+  /** Evidence and report as they stand at the first start; null: nothing but the task so far. */
+  readonly work: {
+    readonly evidence: (firstStart: Date) => Evidence;
+    readonly report: (evidence: Evidence) => ReportDocument;
+  } | null;
 }
 
-const ONE_OR_TWO: ProblemSettings = { k: 2, rounding: 'one or two digits', level: 0.95, paper: 'A4' };
+/** Settings of all of them. */
+export const DEMO_SETTINGS: ProblemSettings = {
+  k: 2,
+  rounding: 'one or two digits',
+  level: 0.95,
+  paper: 'A4',
+};
 
 export const DEMO_PROBLEMS: readonly DemoProblem[] = [
   {
@@ -29,8 +43,7 @@ export const DEMO_PROBLEMS: readonly DemoProblem[] = [
       { id: 'task-limits', text: 'What sets the limits of the prediction?' },
     ],
     owners: ['demo-ines', 'demo-kasimir'],
-    settings: ONE_OR_TWO,
-    evidence: draftSpoutEvidence,
+    work: { evidence: leaningSpoutEvidence, report: leaningSpoutReport },
   },
   {
     number: 4,
@@ -42,8 +55,7 @@ export const DEMO_PROBLEMS: readonly DemoProblem[] = [
       { id: 'task-resistance', text: 'What does it say about the resistance of the air?' },
     ],
     owners: ['demo-maren', 'demo-petra'],
-    settings: ONE_OR_TWO,
-    evidence: null,
+    work: { evidence: fallingCupsEvidence, report: fallingCupsReport },
   },
   {
     number: 6,
@@ -55,8 +67,7 @@ export const DEMO_PROBLEMS: readonly DemoProblem[] = [
       { id: 'task-foretold', text: 'How well can it be foretold?' },
     ],
     owners: ['demo-kasimir', 'demo-maren'],
-    settings: ONE_OR_TWO,
-    evidence: null,
+    work: { evidence: brakedMagnetEvidence, report: brakedMagnetReport },
   },
   {
     number: 9,
@@ -68,8 +79,7 @@ export const DEMO_PROBLEMS: readonly DemoProblem[] = [
       { id: 'task-why', text: 'Why is that tilt the fastest?' },
     ],
     owners: ['demo-petra', 'demo-ines'],
-    settings: ONE_OR_TWO,
-    evidence: null,
+    work: null,
   },
   {
     number: 12,
@@ -77,7 +87,6 @@ export const DEMO_PROBLEMS: readonly DemoProblem[] = [
     statement: 'A jar partly filled with sand is let go on a slope. It rolls, and may stop. Predict where.',
     tasks: [{ id: 'task-where', text: 'Where does the jar stop?' }],
     owners: ['demo-petra'],
-    settings: ONE_OR_TWO,
-    evidence: null,
+    work: null,
   },
 ];

@@ -1,10 +1,13 @@
 import type { Transaction } from 'sequelize';
+import type { Evidence } from '#shared/evidence/evidence.ts';
+import { emptyReport } from '#shared/report/schema/empty-report.ts';
 import type { Database } from '#server/database/database.ts';
 import { hashPassphrase } from '#server/features/account/passphrase.ts';
 import { storeEvidence } from '#server/features/evidence/store-evidence.ts';
+import { seedReport } from '#server/features/report/service.ts';
 import { demoFights, demoSeason } from './fights.ts';
 import { DEMO_PEOPLE } from './people.ts';
-import { DEMO_PROBLEMS } from './problems.ts';
+import { DEMO_PROBLEMS, DEMO_SETTINGS } from './problems.ts';
 import type { DemoProblem } from './problems.ts';
 
 const TEAMS = [
@@ -83,7 +86,7 @@ async function insertProblem(
 ): Promise<void> {
   const { problems, tasks } = database.models;
   const id = `demo-problem-${problem.number}`;
-  const evidence = problem.evidence?.(firstStart) ?? null;
+  const evidence = problem.work?.evidence(firstStart) ?? evidenceOfTasks(problem, firstStart);
   await problems.create(
     {
       id,
@@ -92,8 +95,8 @@ async function insertProblem(
       title: problem.title,
       statement: problem.statement,
       owners: JSON.stringify(problem.owners),
-      settings: JSON.stringify(evidence?.settings ?? problem.settings),
-      evidenceVersion: evidence?.version ?? 0,
+      settings: JSON.stringify(evidence.settings),
+      evidenceVersion: evidence.version,
       createdAt: firstStart.toISOString(),
     },
     { transaction },
@@ -102,7 +105,32 @@ async function insertProblem(
     problem.tasks.map((task, position) => ({ problemId: id, ...task, position })),
     { transaction },
   );
-  if (evidence) await storeEvidence(database, id, evidence, userIdOf, transaction);
+  await storeEvidence(database, id, evidence, userIdOf, transaction);
+  const report = problem.work?.report(evidence) ?? emptyReport();
+  await seedReport(database, id, report, firstStart.toISOString(), transaction);
+}
+
+/** A problem that nobody has begun: each verb of the task waits as a claim without a test. */
+function evidenceOfTasks({ tasks }: DemoProblem, firstStart: Date): Evidence {
+  return {
+    version: 1,
+    settings: DEMO_SETTINGS,
+    instruments: [],
+    quantities: [],
+    series: [],
+    trials: [],
+    models: [],
+    comparisons: [],
+    claims: tasks.map(({ id, text }, index) => ({
+      id: `claim-${index + 1}`,
+      n: index + 1,
+      text,
+      test: null,
+      task: id,
+      declaredAt: firstStart.toISOString(),
+    })),
+    charts: [],
+  };
 }
 
 function userIdOf(name: string): string {
