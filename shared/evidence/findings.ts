@@ -54,6 +54,8 @@ export interface Fault {
   readonly sentence: string;
   /** Id of the row that must be mended (a quantity, model, comparison, series, trial or claim). */
   readonly at: string;
+  /** Set on a fault that was passed on from an input: the symbol of the quantity that has the fault itself. */
+  readonly via?: string | undefined;
   /** Place in an expression's shown text, when the fault has one. */
   readonly span?: { readonly from: number; readonly to: number } | undefined;
 }
@@ -121,7 +123,7 @@ export interface Source {
 
 /** Trials of one series that have equal settings. */
 export interface Group {
-  /** Key of the mean of each reading: `R@series{θ=38 °}`. */
+  /** `series{setting=value}`: the mean of quantity q in this group has the key `q@` and then this. */
   readonly key: string;
   readonly series: string;
   readonly settings: Readonly<Record<string, Reading>>;
@@ -223,7 +225,7 @@ export interface ChartFinding {
 
 export interface Findings {
   readonly version: number;
-  /** By key: `q`, `q@series`, `q@series{setting=value}`, `m3:R@series{…}` (see keyOf in keys.ts). */
+  /** Register values by key: `q`, and `q@series` where the value differs by series. For all else see findValue. */
   readonly values: ReadonlyMap<string, Finding>;
   readonly sources: ReadonlyMap<string, Source>;
   /** Groups of every series, in increasing order of their settings. */

@@ -1,0 +1,178 @@
+import { at } from '#shared/numeric/element.ts';
+import { dependsOn } from './dependencies.ts';
+import type { Evaluation } from './evaluation.ts';
+import type { Comparison, Model } from './evidence.ts';
+import { fault, isFault } from './fault.ts';
+import type { ComparisonFinding, Fault } from './findings.ts';
+import { symbolName } from './register.ts';
+import { createScope, notDefined } from './scope.ts';
+import { gather, inRange, selectTrials, siRange, type Pick, type SiRange } from './selected-trials.ts';
+import { rowOf, type Uncertain } from './uncertain.ts';
+
+/** A parameter as a comparison lets it go. */
+export interface FreeParameter {
+  readonly quantity: string;
+  readonly start: number;
+  readonly min: number | undefined;
+  readonly max: number | undefined;
+}
+
+/** What a comparison sets against its model: trials, sorted by why they count or not, and their columns. */
+export interface ComparisonData {
+  readonly comparison: Comparison;
+  readonly model: Model;
+  readonly free: readonly FreeParameter[];
+  readonly limits: readonly SiRange[];
+  /** Trials that count, and those that are kept and complete but outside trust. */
+  readonly used: readonly Pick[];
+  readonly untrusted: readonly Pick[];
+  readonly outside: ComparisonFinding['outside'];
+  /** Measured side and what the model takes, over the used trials. */
+  readonly measured: Uncertain;
+  readonly leaves: ReadonlyMap<string, Uncertain>;
+}
+
+/** A comparison whose trials cannot be had, with what is known of them. */
+export interface FaultyComparison {
+  readonly fault: Fault;
+  readonly outside: ComparisonFinding['outside'];
+}
+
+/** Gathers a comparison's trials and columns. */
+export function comparisonData(
+  run: Evaluation,
+  comparison: Comparison,
+  free: readonly FreeParameter[],
+): ComparisonData | FaultyComparison {
+  const model = run.register.models.get(comparison.model);
+  if (model === undefined)
+    return faulty(
+      fault('source gone', 'The model of this comparison is gone. Choose another.', comparison.id),
+    );
+  const selected = selectTrials(run, comparison.selection, comparison.id);
+  if (isFault(selected)) return faulty(selected);
+  const limits: SiRange[] = [];
+  for (const limit of model.limits) {
+    const range = siRange(run, limit, model.id);
+    if (isFault(range)) return faulty(range);
+    limits.push(range);
+  }
+  const kept = selected.filter(({ id }) => run.register.trials.get(id)?.excluded === undefined);
+  const outside: { trial: string; why: 'excluded' | 'outside trust' | 'incomplete' }[] = selected
+    .filter(({ id }) => run.register.trials.get(id)?.excluded !== undefined)
+    .map(({ id }) => ({ trial: id, why: 'excluded' }));
+  if (kept.length === 0) return faulty(noTrials(comparison, selected.length), outside);
+  const whole = sideColumns(run, { comparison, model, free, limits }, kept);
+  if (isFault(whole)) return faulty(whole, outside);
+  const [used, untrusted]: [Pick[], Pick[]] = [[], []];
+  kept.forEach((pick, row) => {
+    if (!whole.complete(row)) outside.push({ trial: pick.id, why: 'incomplete' });
+    else if (whole.trusted(row)) used.push(pick);
+    else {
+      untrusted.push(pick);
+      outside.push({ trial: pick.id, why: 'outside trust' });
+    }
+  });
+  if (used.length === 0) return faulty(noneUsed(run, comparison, model, kept.length), outside);
+  const part =
+    used.length === kept.length ? whole : sideColumns(run, { comparison, model, free, limits }, used);
+  if (isFault(part)) return faulty(part, outside);
+  return {
+    comparison,
+    model,
+    free,
+    limits,
+    used,
+    untrusted,
+    outside,
+    measured: part.measured,
+    leaves: part.leaves,
+  };
+}
+
+function faulty(because: Fault, outside: ComparisonFinding['outside'] = []): FaultyComparison {
+  return { fault: because, outside };
+}
+
+function noTrials(comparison: Comparison, selected: number): Fault {
+  const sentence =
+    selected === 0
+      ? 'No trial is selected. Choose a series that has trials, or widen the range.'
+      : 'Every selected trial is excluded. Bring one back, or log another.';
+  return fault('no trials', `“${comparison.name}” has nothing to compare. ${sentence}`, comparison.id);
+}
+
+function noneUsed(run: Evaluation, comparison: Comparison, model: Model, kept: number): Fault {
+  return fault(
+    'no trials',
+    `“${comparison.name}” has nothing to compare: ${kept === 1 ? 'its trial is' : `all of its ${kept} trials are`} incomplete or outside the range in which model ${model.n} is trusted.`,
+    comparison.id,
+  );
+}
+
+interface Definition {
+  readonly comparison: Comparison;
+  readonly model: Model;
+  readonly free: readonly FreeParameter[];
+  readonly limits: readonly SiRange[];
+}
+
+interface SideColumns {
+  readonly measured: Uncertain;
+  readonly leaves: ReadonlyMap<string, Uncertain>;
+  complete(row: number): boolean;
+  trusted(row: number): boolean;
+}
+
+/** Both sides' columns over some picks; the model is run once at the start values to see what it takes. */
+function sideColumns(run: Evaluation, definition: Definition, picks: readonly Pick[]): SideColumns | Fault {
+  const { model, free, limits, comparison } = definition;
+  const { register } = run;
+  const origin = register.quantities.get(model.output)?.def.origin;
+  if (origin === 'predicted' || origin === 'fitted')
+    return fault(
+      'missing input',
+      `${symbolName(register, model.output)} is not measured, so that nothing can be set against it. Let the model's output be a quantity that trials read.`,
+      model.id,
+    );
+  if (!model.equations.some(({ defines }) => defines === model.output))
+    return notDefined(register, model.output, model.id);
+  const measured = gather(run, model.output, picks);
+  if (isFault(measured)) return measured;
+  const parameters = new Set(free.map(({ quantity }) => quantity));
+  const leaves = new Map<string, Uncertain>();
+  const scope = createScope(register, picks.length, (id) => {
+    const start = free.find(({ quantity }) => quantity === id);
+    if (start !== undefined)
+      return { values: Float64Array.of(start.start), terms: [], known: false, hue: 'predicted' };
+    if (dependsOn(register, id, parameters)) return null;
+    const value = gather(run, id, picks);
+    if (!isFault(value)) leaves.set(id, value);
+    return value;
+  });
+  const predicted = scope.find(model.output, model.id);
+  if (isFault(predicted) && predicted.code !== 'not finite') return predicted;
+  const ranges = limits.map((limit) => ({ limit, value: scope.find(limit.quantity, model.id) }));
+  const broken = ranges.find(({ value }) => isFault(value));
+  if (broken !== undefined && isFault(broken.value)) return broken.value;
+  const unknown = free.find(({ quantity }) => !register.quantities.has(quantity));
+  if (unknown !== undefined)
+    return fault(
+      'source gone',
+      `A free parameter of “${comparison.name}” is gone. Choose another.`,
+      comparison.id,
+    );
+  const columns = [measured, ...leaves.values()];
+  return {
+    measured,
+    leaves,
+    complete: (row) => columns.every(({ values }) => !Number.isNaN(rowOf(values, row))),
+    trusted: (row) =>
+      ranges.every(({ limit, value }) => isFault(value) || inRange(rowOf(value.values, row), limit)),
+  };
+}
+
+/** Whether every value of a column is the same. */
+export function isConstant({ values }: Uncertain): boolean {
+  return values.every((value) => value === at(values, 0));
+}
