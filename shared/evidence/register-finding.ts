@@ -52,7 +52,7 @@ function unreadable(run: Evaluation, quantity: Quantity, series: string): readon
 }
 
 /** Trials whose inputs are there, but whose result is not a finite number. */
-function notFinite(run: Evaluation, quantity: Quantity, series: string, value: Uncertain): readonly string[] {
+function notFinite(run: Evaluation, quantity: Quantity, series: string, value: Uncertain): readonly Fault[] {
   const ids = trialIds(run, series);
   const inputs = columnInputs(run, quantity.id, series);
   const bad = ids.filter(
