@@ -8,6 +8,7 @@ import type { EventHub } from './features/events/service.ts';
 import type { SessionLayer } from './features/session/session-layer.ts';
 import type { Csrf } from './middleware/csrf.ts';
 import type { Limits } from './middleware/rate-limits.ts';
+import type { ReportRenderer } from './rendering/report-renderer.ts';
 import type { OpenSockets } from './sockets/open-sockets.ts';
 
 /** Everything the server's features stand on, made once at the start and handed down. */
@@ -24,6 +25,7 @@ export interface ServerDeps {
   readonly events: EventHub;
   readonly evidenceCache: EvidenceCache;
   readonly evaluation: Evaluation;
+  readonly renderer: ReportRenderer;
   /** Serves the client for every path outside /api; null where there is none (tests of the API). */
   readonly client: RequestHandler | null;
 }

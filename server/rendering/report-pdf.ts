@@ -3,6 +3,7 @@ import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { Findings } from '#shared/evidence/findings.ts';
 import { blockNumbers } from '#shared/report/block-numbers.ts';
 import type { ReportDocument } from '#shared/report/schema/report-node.ts';
+import { settingNames } from '#shared/report/untied-numbers.ts';
 import { PdfWriter } from './pdf/pdf-writer.ts';
 import { drawBlocks } from './report/block-handlers.ts';
 import { NumberSources } from './report/number-sources.ts';
@@ -94,6 +95,7 @@ function startContext(writer: PdfWriter, input: ReportPdfInput): RenderContext {
     findings,
     numbers: blockNumbers(input.document),
     sources: new NumberSources(evidence, findings),
+    settings: settingNames(evidence),
     plates,
     element: writer.root,
     left: frame.left,

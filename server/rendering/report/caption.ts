@@ -2,25 +2,16 @@ import type { StructureElement } from '../pdf/pdf-document.ts';
 import { drawLines, LinesOwner } from '../text/draw-lines.ts';
 import type { InlineRun } from '../text/inline-run.ts';
 import type { TextLine } from '../text/layout-paragraph.ts';
-import { CAPTION, INK, LEAK, textStyle } from './print-style.ts';
+import { CAPTION, INK, textStyle } from './print-style.ts';
 import type { RenderContext } from './render-context.ts';
-import { splitUntied } from './split-untied.ts';
 import { layOutLines } from './text-block.ts';
 
 /** A caption: "Figure 4." in ink, then what it says. */
 export function layOutCaption(label: string, text: string, width: number) {
-  const style = textStyle(CAPTION);
   const runs: InlineRun[] = [
     { kind: 'text', text: `${label}. `, style: textStyle(CAPTION, 'bodyBold', INK) },
+    { kind: 'text', text: text.trim(), style: textStyle(CAPTION) },
   ];
-  for (const stretch of splitUntied(text.trim())) {
-    runs.push({
-      kind: 'text',
-      text: stretch.text,
-      style,
-      ...(stretch.isUntied ? { whole: true, dashed: LEAK } : {}),
-    });
-  }
   return layOutLines(runs, CAPTION, width);
 }
 

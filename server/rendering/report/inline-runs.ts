@@ -9,7 +9,7 @@ import { FORMULA_SCALE, hueColour, INK_2, INK_3, LEAK, LETTER, PUT_IN_COLOURS, t
 import type { RenderContext } from './render-context.ts';
 import { splitUntied } from './split-untied.ts';
 
-type InlineContext = Pick<RenderContext, 'evidence' | 'findings' | 'sources'>;
+type InlineContext = Pick<RenderContext, 'evidence' | 'findings' | 'sources' | 'settings'>;
 
 /** The runs of a sentence. */
 export function inlineRuns(
@@ -20,7 +20,7 @@ export function inlineRuns(
   return (nodes ?? []).flatMap((node): InlineRun[] => {
     switch (node.type) {
       case 'text':
-        return textRuns(node, face);
+        return textRuns(node, face, context);
       case 'hardBreak':
         return [{ kind: 'break' }];
       case 'liveValue':
@@ -38,14 +38,14 @@ function stackFor(face: TextFace, marks: readonly ReportMark[] = []): FontStack 
   return isItalic ? face.italic : face.regular;
 }
 
-function textRuns(node: TextNode, face: TextFace): TextRun[] {
+function textRuns(node: TextNode, face: TextFace, context: InlineContext): TextRun[] {
   const style = textStyle(face, stackFor(face, node.marks));
   const link = node.marks?.find((mark) => mark.type === 'link');
   if (link) {
     const element = { tag: 'Link', href: link.attrs.href } as const;
     return [{ kind: 'text', text: node.text, style, element, underline: INK_3 }];
   }
-  return splitUntied(node.text).map(({ text, isUntied }): TextRun =>
+  return splitUntied(node.text, context.settings).map(({ text, isUntied }): TextRun =>
     isUntied ? { kind: 'text', text, style, whole: true, dashed: LEAK } : { kind: 'text', text, style },
   );
 }

@@ -1,6 +1,7 @@
 import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { Findings } from '#shared/evidence/findings.ts';
 import type { BlockNumbers } from '#shared/report/block-numbers.ts';
+import type { SettingNames } from '#shared/report/untied-numbers.ts';
 import type { BlockNode } from '#shared/report/schema/report-node.ts';
 import type { OutlineItem, StructureElement } from '../pdf/pdf-document.ts';
 import type { PdfWriter } from '../pdf/pdf-writer.ts';
@@ -15,6 +16,8 @@ export interface RenderContext {
   readonly findings: Findings;
   readonly numbers: BlockNumbers;
   readonly sources: NumberSources;
+  /** Values that only name a setting, and so need not be tied. */
+  readonly settings: SettingNames;
   /** Pictures by fingerprint. */
   readonly plates: ReadonlyMap<string, Uint8Array>;
   /** Element of the structure that the block is added to. */
