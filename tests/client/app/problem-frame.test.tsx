@@ -1,5 +1,5 @@
 import { act, cleanup, screen, within } from '@testing-library/react';
-import { afterEach, beforeEach, expect, test, vi } from 'vitest';
+import { afterEach, beforeAll, beforeEach, expect, test, vi } from 'vitest';
 import type { Quantity, Series, Trial } from '#shared/evidence/evidence.ts';
 import { fakeServer, refusal, type FakeServer } from '../support/fake-server.ts';
 import { emptyEvidence, problem, session, summary, team, TODAY } from '../support/invented.ts';
@@ -30,7 +30,21 @@ function trial(number: number): Trial {
   };
 }
 
+/** A screen's file is read when it is first opened. */
+const ENOUGH = { timeout: 15_000 };
+
+async function stationLine() {
+  return within(await screen.findByRole('navigation', { name: 'Stations of this problem' }, ENOUGH));
+}
+
 let server: FakeServer;
+
+// Each screen's file is read once, before the clock of the first test runs.
+beforeAll(async () => {
+  await import('#src/app/frames/problem-frame.tsx');
+  await import('#src/app/screens/trials-screen.tsx');
+  await import('#src/app/screens/report-screen.tsx');
+}, 90_000);
 
 beforeEach(() => {
   vi.useFakeTimers({ now: TODAY, toFake: ['Date'] });
@@ -55,7 +69,8 @@ afterEach(() => {
 test('problem, when it is opened the first time: begins at Trials, with its count in the cup', async () => {
   const { router } = renderAt('/team/tern-rock/problem/1');
 
-  const stations = within(await screen.findByRole('navigation', { name: 'Stations of this problem' }));
+  const stations = await stationLine();
+  await stations.findByText('1 trial');
   expect(stations.getAllByRole('link').map((link) => link.textContent)).toEqual([
     'Trials1 trial',
     'Model',
@@ -69,14 +84,16 @@ test('problem, when it was left at another station: opens there', async () => {
   localStorage.setItem('holdwater:station:tern-rock/1', 'report');
   const { router } = renderAt('/team/tern-rock/problem/1');
 
-  await screen.findByRole('navigation', { name: 'Stations of this problem' });
-
-  expect(router.state.location.pathname).toBe('/team/tern-rock/problem/1/report');
+  await vi.waitFor(
+    () => expect(router.state.location.pathname).toBe('/team/tern-rock/problem/1/report'),
+    ENOUGH,
+  );
 });
 
 test('problem, when somebody else logs a trial: the count follows without asking the server again', async () => {
   renderAt('/team/tern-rock/problem/1/trials');
-  await screen.findByText('1 trial');
+  const stations = await stationLine();
+  await stations.findByText('1 trial');
 
   act(() =>
     server.sockets.at(-1)?.says({
@@ -87,13 +104,14 @@ test('problem, when somebody else logs a trial: the count follows without asking
     }),
   );
 
-  expect(await screen.findByText('2 trials')).toBeTruthy();
+  expect(await stations.findByText('2 trials')).toBeTruthy();
   expect(server.asked(EVIDENCE)).toHaveLength(1);
 });
 
 test('problem, when a step is missing: the evidence is fetched again', async () => {
   renderAt('/team/tern-rock/problem/1/trials');
-  await screen.findByText('1 trial');
+  const stations = await stationLine();
+  await stations.findByText('1 trial');
   server.on(EVIDENCE, {
     evidence: emptyEvidence({
       version: 6,
@@ -113,7 +131,7 @@ test('problem, when a step is missing: the evidence is fetched again', async () 
     }),
   );
 
-  expect(await screen.findByText('3 trials')).toBeTruthy();
+  expect(await stations.findByText('3 trials')).toBeTruthy();
 });
 
 test('problem, when others have it open: says who is here, and where', async () => {
@@ -150,7 +168,7 @@ test('problem, when a digit is pressed: goes to that station', async () => {
 
   await user.keyboard('0');
 
-  expect(router.state.location.pathname).toBe('/team/tern-rock');
+  await vi.waitFor(() => expect(router.state.location.pathname).toBe('/team/tern-rock'), ENOUGH);
 });
 
 test.each([

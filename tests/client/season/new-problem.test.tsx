@@ -1,10 +1,14 @@
 import { cleanup, screen } from '@testing-library/react';
-import { afterEach, beforeEach, expect, test, vi } from 'vitest';
+import { afterEach, beforeAll, beforeEach, expect, test, vi } from 'vitest';
 import { fakeServer, json, refusal, type FakeServer } from '../support/fake-server.ts';
 import { session, summary, team } from '../support/invented.ts';
 import { renderAt, valueOf } from '../support/render-at.tsx';
 
 let server: FakeServer;
+
+beforeAll(async () => {
+  await import('#src/app/screens/trials-screen.tsx');
+}, 90_000);
 
 beforeEach(() => {
   server = fakeServer();
@@ -36,7 +40,9 @@ test('new problem, when a task is pasted: proposes what it asks, and sends what 
   await user.click(screen.getByRole('checkbox', { name: 'Kasimir Lund' }));
   await user.click(screen.getByRole('button', { name: 'Begin problem' }));
 
-  await vi.waitFor(() => expect(router.state.location.pathname).toContain('/problem/12'));
+  await vi.waitFor(() => expect(router.state.location.pathname).toContain('/problem/12'), {
+    timeout: 15_000,
+  });
   expect(server.asked('POST /api/teams/tern-rock/problems')[0]?.body).toEqual({
     number: 12,
     title: 'Sand Roller',
