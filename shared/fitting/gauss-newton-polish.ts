@@ -10,7 +10,7 @@ const MAX_STEPS = 40;
 /** A step must be this much shorter than the one before, or the polish has reached the rounding. */
 const SHRINK = 0.97;
 
-/** A first step longer than this share of a parameter means that the search had not ended near a minimum. */
+/** A step longer than this share of a parameter means that the search had not ended near a minimum. */
 const LARGEST_STEP = 0.1;
 
 /** A step this small beside its parameter changes nothing more. */
@@ -21,13 +21,14 @@ const ALLOWED_GROWTH = 1e-9;
 
 /**
  * Gauss-Newton steps after a search has settled: the search stops when χ² no longer changes, which leaves half of
- * the digits of the parameters to be had.
+ * the digits of the parameters to be had. A step is kept only when the one that would follow it is shorter, since
+ * undamped steps lead away from a minimum whose residuals are large.
  *
  * @param evaluator - the problem
  * @param from - where the search settled
  * @param free - indices of the parameters that are not held on a bound
  * @param bounds - box that must not be left
- * @returns the last point whose step was shorter than the one before, and the number of steps taken
+ * @returns the last point kept, and the number of steps that led there
  */
 export function gaussNewtonPolish(
   evaluator: Evaluator,
@@ -36,22 +37,25 @@ export function gaussNewtonPolish(
   bounds: Bounds,
 ): { point: Point; steps: number } {
   let point = from;
-  let before = Infinity;
+  let step = free.length > 0 ? stepFrom(evaluator, point, free) : null;
   let steps = 0;
-  while (steps < MAX_STEPS && free.length > 0) {
-    const step = stepFrom(evaluator, point, free);
-    if (step === null) break;
-    const target = point.parameters.map((value, j) => value + at(step, j));
-    const size = relativeSize(step, target);
-    if (!(size < before * SHRINK) || size > LARGEST_STEP || leaves(target, bounds)) break;
+  while (step !== null && steps < MAX_STEPS) {
+    const size = relativeSize(step, point.parameters);
+    const target = moved(point.parameters, step);
+    if (!(size > SMALLEST_STEP) || size > LARGEST_STEP || leaves(target, bounds)) break;
     const next = evaluator.pointAt(target);
     if (!(next.length <= from.length * (1 + ALLOWED_GROWTH))) break;
+    const following = stepFrom(evaluator, next, free);
+    if (following === null || !(relativeSize(following, target) < size * SHRINK)) break;
     point = next;
-    before = size;
+    step = following;
     steps++;
-    if (size < SMALLEST_STEP) break;
   }
   return { point, steps };
+}
+
+function moved(parameters: Float64Array, step: Float64Array): Float64Array {
+  return parameters.map((value, j) => value + at(step, j));
 }
 
 /** Step over all parameters, zero for those that are held; null where there is none. */
@@ -70,8 +74,11 @@ function stepFrom(evaluator: Evaluator, point: Point, free: readonly number[]): 
 }
 
 /** Largest step beside its parameter. */
-function relativeSize(step: Float64Array, target: Float64Array): number {
-  return step.reduce((most, value, j) => Math.max(most, Math.abs(value) / (Math.abs(at(target, j)) || 1)), 0);
+function relativeSize(step: Float64Array, parameters: Float64Array): number {
+  return step.reduce(
+    (most, value, j) => Math.max(most, Math.abs(value) / (Math.abs(at(parameters, j)) || 1)),
+    0,
+  );
 }
 
 function leaves(target: Float64Array, bounds: Bounds): boolean {

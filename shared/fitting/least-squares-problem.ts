@@ -32,7 +32,7 @@ export interface FitOptions {
   readonly maxEvaluations?: number | undefined;
 }
 
-/** Default of FitOptions.maxEvaluations: the hardest NIST set from its far start needs about 700. */
+/** Default of FitOptions.maxEvaluations: the slowest NIST set (Bennett5, from its far start) needs 770. */
 const MAX_EVALUATIONS = 2000;
 
 /**

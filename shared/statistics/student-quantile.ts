@@ -12,7 +12,7 @@ import { studentTails } from './student-tails.ts';
  * @param p - probability, 0 ≤ p ≤ 1
  * @param degreesOfFreedom - ν > 0, not necessarily whole; Infinity gives the normal quantile
  * @returns t; −Infinity at 0, Infinity at 1, NaN outside the domain
- * @example studentQuantile(0.975, 10).toFixed(12) // => '2.228138851965'
+ * @example studentQuantile(0.975, 10).toFixed(12) // => '2.228138851986'
  */
 export function studentQuantile(p: number, degreesOfFreedom: number): number {
   const nu = degreesOfFreedom;

@@ -120,6 +120,30 @@ describe('bounds', () => {
   });
 });
 
+describe('residuals far larger than their uncertainties', () => {
+  const shiftedDecay: Curve = {
+    value: (p, x) => decay.value(p, x) + at(p, 2),
+    derivatives: [...decay.derivatives, () => 1],
+  };
+
+  test('where undamped steps would lead away from the minimum: the search keeps its own end', () => {
+    const y = [10.6588, 6.889, 4.6049, 3.1914, 2.2279, 1.9207, 1.4423, 1.2476, 1.0416];
+    const points = { x: y.map((_, i) => 0.6 * i), y, sigmas: y.map(() => 0.1) };
+
+    const fit = convergedFit(
+      fitCurve(shiftedDecay, points, [
+        { start: -0.9184, min: -1.071, max: 0.002668 },
+        { start: 3.6368, min: 0.05, max: 3.7146 },
+        { start: 1.7962, min: 0.7588, max: 4.4843 },
+      ]),
+    );
+
+    // Zero of dχ²/d(rate) with the amplitude on its bound and the offset at its best, found with mpmath.
+    expect(fit.atBound).toEqual([true, false, false]);
+    expect(fit.parameters[1]).toAgreeTo(0.944698324526, { digits: 5 });
+  });
+});
+
 describe('what the data do not determine', () => {
   const sumOfTwo: Curve = {
     value: (p, x) => (at(p, 0) + at(p, 1)) * x + at(p, 2),
