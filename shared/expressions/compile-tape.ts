@@ -113,18 +113,28 @@ class ArrayTape implements Tape {
       this.slopes = this.isActive.map((isActive) => (isActive ? new Float64Array(length) : null));
       this.frames = [];
     }
+    const isSame = this.frames.length > 0 && this.putIn(columns);
+    if (isSame) return;
     this.program.steps.forEach((step, i) => {
       const known = this.frames[i];
-      if (step.operation === 'input') this.frames[i] = this.inputFrame(i, columns[step.value] ?? NaN);
-      else if (known === undefined || this.usesInput(i)) this.frames[i] = this.frame(i, known?.out);
+      this.frames[i] =
+        step.operation === 'input'
+          ? this.inputFrame(i, columns[step.value] ?? NaN)
+          : this.frame(i, known?.out);
     });
   }
 
-  private usesInput(index: number): boolean {
-    const step = this.program.steps[index];
-    return [step?.a, step?.b, step?.c].some(
-      (part) => part !== undefined && this.program.steps[part]?.operation === 'input',
-    );
+  /** Puts single numbers into the arrays that hold them; false when a column is another array than before. */
+  private putIn(columns: readonly (Float64Array | number)[]): boolean {
+    let isSame = true;
+    this.program.steps.forEach((step, i) => {
+      if (step.operation !== 'input') return;
+      const column = columns[step.value];
+      const held = this.frames[i]?.out;
+      if (typeof column === 'number') held?.fill(column);
+      else if (held !== column) isSame = false;
+    });
+    return isSame;
   }
 
   private inputFrame(index: number, column: Float64Array | number): StepFrame {

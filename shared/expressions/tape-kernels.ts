@@ -104,6 +104,28 @@ export function reverseStep(operation: Operation, frame: StepFrame): void {
       if (ga !== null) for (let k = 0; k < n; k += 1) add(ga, k, at(g, k));
       if (gb !== null) for (let k = 0; k < n; k += 1) add(gb, k, -at(g, k));
       return;
+    case 'multiply':
+      if (ga !== null)
+        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(ga, k, at(g, k) * at(b, k * sb));
+      if (gb !== null)
+        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(gb, k, at(g, k) * at(a, k * sa));
+      return;
+    case 'divide':
+      if (ga !== null)
+        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(ga, k, at(g, k) / at(b, k * sb));
+      if (gb !== null)
+        for (let k = 0; k < n; k += 1)
+          if (counts(g, k, isGuarded)) add(gb, k, (-at(g, k) * at(out, k * so)) / at(b, k * sb));
+      return;
+    case 'square':
+      if (ga !== null)
+        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(ga, k, 2 * at(g, k) * at(a, k * sa));
+      return;
+    case 'root':
+      if (ga !== null)
+        for (let k = 0; k < n; k += 1)
+          if (counts(g, k, isGuarded)) add(ga, k, (0.5 * at(g, k)) / at(out, k * so));
+      return;
     case 'choose': {
       const { a: when, sa: sw } = frame;
       for (let k = 0; k < n; k += 1) {
@@ -122,43 +144,31 @@ export function reverseStep(operation: Operation, frame: StepFrame): void {
       const slope = frame.real?.slope ?? notANumber;
       if (ga === null) return;
       for (let k = 0; k < n; k += 1) {
-        const gk = at(g, k);
-        if (gk !== 0 || !isGuarded) add(ga, k, gk * slope(at(a, k * sa), at(out, k * so)));
+        if (counts(g, k, isGuarded)) add(ga, k, at(g, k) * slope(at(a, k * sa), at(out, k * so)));
       }
       return;
     }
     default:
-      if (ga !== null) {
-        for (let k = 0; k < n; k += 1) {
-          const gk = at(g, k);
-          if (gk === 0 && isGuarded) continue;
-          add(ga, k, gk * slopeOfFirst(operation, at(a, k * sa), at(b, k * sb), at(out, k * so)));
-        }
-      }
-      if (gb !== null) {
-        for (let k = 0; k < n; k += 1) {
-          const gk = at(g, k);
-          if (gk === 0 && isGuarded) continue;
-          add(gb, k, gk * slopeOfSecond(operation, at(a, k * sa), at(b, k * sb), at(out, k * so)));
-        }
+      for (let k = 0; k < n; k += 1) {
+        if (!counts(g, k, isGuarded)) continue;
+        const [x, y, z] = [at(a, k * sa), at(b, k * sb), at(out, k * so)];
+        if (ga !== null) add(ga, k, at(g, k) * slopeOfFirst(operation, x, y, z));
+        if (gb !== null) add(gb, k, at(g, k) * slopeOfSecond(operation, x, y, z));
       }
   }
 }
 
+/** A row that no choice took has slope nought, and must not meet an infinite one. */
+function counts(g: Float64Array, k: number, isGuarded: boolean): boolean {
+  return !isGuarded || g[k] !== 0;
+}
+
 function slopeOfFirst(operation: Operation, a: number, b: number, out: number): number {
   switch (operation) {
-    case 'multiply':
-      return b;
-    case 'divide':
-      return 1 / b;
     case 'power':
       return b === 0 ? 0 : b * a ** (b - 1);
-    case 'square':
-      return 2 * a;
     case 'inverse':
       return -out * out;
-    case 'root':
-      return 0.5 / out;
     case 'angle of':
       return b / (a * a + b * b);
     case 'length of':
@@ -171,10 +181,6 @@ function slopeOfFirst(operation: Operation, a: number, b: number, out: number): 
 
 function slopeOfSecond(operation: Operation, a: number, b: number, out: number): number {
   switch (operation) {
-    case 'multiply':
-      return a;
-    case 'divide':
-      return -out / b;
     case 'power':
       return a === 0 && b > 0 ? 0 : out * Math.log(a);
     case 'angle of':
