@@ -125,7 +125,7 @@ const QUANTITIES: Quantity[] = [
   derived('q-m', 'm', 'mass of the stack', 'g', '{q-n}*{q-m1}'),
   derived('q-area', 'A', 'area of the rim', 'cm^2', 'pi/4*{q-dia}^2'),
   derived('q-ma', 'm_a', 'air carried along', 'g', '8/3*{q-rho}*({q-dia}/2)^3'),
-  derived('q-re', 'Re', 'Reynolds number', '1', '{q-v}*{q-dia}/{q-nu}'),
+  derived('q-re', 'R_e', 'Reynolds number', '1', '{q-v}*{q-dia}/{q-nu}'),
   {
     id: 'q-cd',
     symbol: 'C_d',
