@@ -2,9 +2,10 @@ import { rationalToNumber } from '#shared/numeric/rational.ts';
 import type { Unit } from './unit.ts';
 
 /**
- * A value in some unit, in coherent SI. One rounding for decimal prefixes: 46.4 cm is 0.464 m exactly as typed.
+ * A value in some unit, in coherent SI, to the last bit or two of a double. Readings go through readSi, which starts
+ * from their decimals and rounds once.
  *
- * @example toSi(46.4, { scale: 0.01, inverseScale: 100 }) // => 0.464
+ * @example toSi(20, { scale: 0.01, inverseScale: 100 }) // => 0.2
  */
 export function toSi(value: number, unit: Pick<Unit, 'scale' | 'inverseScale' | 'offset'>): number {
   return uncertaintyToSi(value, unit) + offsetOf(unit);

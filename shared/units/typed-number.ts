@@ -42,7 +42,7 @@ const MAX_LENGTH = 40;
  *
  * @param text - what stands in the field
  * @param defaultUnit - unit of the field; a typed unit must measure the same kind of quantity
- * @example parseTypedNumber('44,7(4)', 'cm') // => { ok: true, reading: { text: '44.7', unit: 'cm', u: '0.4' }, understood: '44.7 ± 0.4 cm' }
+ * @example parseTypedNumber('44,7(4)', 'cm') // => { ok: true, reading: { text: '44.7', unit: 'cm', u: '0.4' }, understood: '44.7\u00A0±\u00A00.4\u00A0cm' }
  * @example parseTypedNumber('1,234.5', 'cm').mend // => '1234.5'
  */
 export function parseTypedNumber(text: string, defaultUnit: string): TypedNumber {
