@@ -1,5 +1,6 @@
 import { Dialog as Radix } from 'radix-ui';
 import type { ReactNode } from 'react';
+import { Scrim } from './scrim.tsx';
 
 interface DialogProps {
   readonly open: boolean;
@@ -19,7 +20,7 @@ export function Dialog({ open, onClose, title, sentence, actions, children }: Di
   return (
     <Radix.Root open={open} onOpenChange={(isOpen) => !isOpen && onClose()}>
       <Radix.Portal>
-        <Radix.Overlay className="fixed inset-0 z-20 bg-ink/25 dark:bg-desk/70" />
+        <Scrim />
         <Radix.Content
           {...(sentence === undefined ? { 'aria-describedby': undefined } : {})}
           className="rises fixed top-1/2 left-1/2 z-20 max-h-[calc(100dvh-32px)] w-[min(460px,calc(100vw-32px))] -translate-1/2 overflow-y-auto rounded-md bg-paper px-6 pt-[22px] pb-5 shadow-card"

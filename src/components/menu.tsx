@@ -19,7 +19,7 @@ interface MenuProps {
 /** A short list of actions at the place where it was asked for. */
 export function Menu({ trigger, items, align = 'start' }: MenuProps) {
   return (
-    <DropdownMenu.Root>
+    <DropdownMenu.Root modal={false}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
       <DropdownMenu.Portal>
         <DropdownMenu.Content

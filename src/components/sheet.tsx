@@ -1,6 +1,7 @@
 import { Dialog as Radix } from 'radix-ui';
 import type { ReactNode } from 'react';
 import { Button } from './button.tsx';
+import { Scrim } from './scrim.tsx';
 
 interface SheetProps {
   readonly open: boolean;
@@ -16,7 +17,7 @@ export function Sheet({ open, onClose, title, isTitleHidden = false, children }:
   return (
     <Radix.Root open={open} onOpenChange={(isOpen) => !isOpen && onClose()}>
       <Radix.Portal>
-        <Radix.Overlay className="fixed inset-0 z-20 bg-ink/25 dark:bg-desk/70" />
+        <Scrim />
         <Radix.Content
           aria-describedby={undefined}
           className="slides-up fixed inset-x-0 bottom-0 z-20 max-h-[85dvh] overflow-y-auto rounded-t-lg bg-paper px-5 pt-4 pb-[max(20px,env(safe-area-inset-bottom))] shadow-card"

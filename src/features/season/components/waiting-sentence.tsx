@@ -13,7 +13,7 @@ export function WaitingSentence({ things }: { readonly things: readonly Waiting[
         <Fragment key={key}>
           {index > 0 && (index === things.length - 1 ? ', and ' : ', ')}
           {before}
-          <Link to={to} className="border-b-[1.25px] border-edge text-ink hover:border-ink">
+          <Link to={to} className="border-b-[1.25px] border-edge whitespace-nowrap text-ink hover:border-ink">
             {linked}
           </Link>
           {after}
