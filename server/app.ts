@@ -24,7 +24,7 @@ const MAX_JSON = '2mb';
 export function createApp(deps: ServerDeps): Express {
   const app = express();
   app.disable('x-powered-by');
-  app.use(requestId, requestLog(deps.logger), securityHeaders(deps.environment.mode));
+  app.use(requestId, requestLog(deps.logger), ...securityHeaders(deps.environment.mode));
   app.use(
     '/api',
     noStore,

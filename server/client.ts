@@ -1,7 +1,9 @@
 import type { Server } from 'node:http';
+import { readFile } from 'node:fs/promises';
 import path from 'node:path';
 import express from 'express';
 import type { RequestHandler } from 'express';
+import { styleNonce } from './middleware/security-headers.ts';
 
 export interface ServedClient {
   readonly handler: RequestHandler;
@@ -10,8 +12,19 @@ export interface ServedClient {
 
 const YEAR_SECONDS = 31_536_000;
 
-/** The built client: files with a hash in their name are kept for ever, index.html is asked for every time. */
-export function serveBuiltClient(folder: string): ServedClient {
+/** Stands in index.html where the nonce of each answer goes. */
+const NONCE_PLACE = '{style-nonce}';
+
+/**
+ * The built client: files with a hash in their name are kept for ever; index.html is never kept, for it carries the
+ * nonce of its own answer.
+ */
+export async function serveBuiltClient(folder: string): Promise<ServedClient> {
+  const page = await readFile(path.join(folder, 'index.html'), 'utf8');
+  const sendPage: RequestHandler = (_request, response) => {
+    response.setHeader('cache-control', 'no-store');
+    response.type('html').send(page.replace(NONCE_PLACE, styleNonce(response)));
+  };
   const router = express.Router();
   router.use(
     '/assets',
@@ -22,11 +35,9 @@ export function serveBuiltClient(folder: string): ServedClient {
       fallthrough: false,
     }),
   );
-  router.use(express.static(folder, { index: false, setHeaders: (response) => noCache(response) }));
-  router.get('/{*any}', (_request, response) => {
-    noCache(response);
-    response.sendFile('index.html', { root: folder });
-  });
+  router.get('/index.html', sendPage);
+  router.use(express.static(folder, { index: false, setHeaders: noCache }));
+  router.get('/{*any}', sendPage);
   return { handler: router, close: () => Promise.resolve() };
 }
 

@@ -12,8 +12,7 @@ export function requestLog(logger: Logger): RequestHandler {
     wrapSerializers: false,
     genReqId: (request) => ('requestId' in request ? String(request.requestId) : ''),
     autoLogging: { ignore: (request) => !(request.url ?? '').startsWith('/api/') },
-    customLogLevel: (_request, response, error) =>
-      error || response.statusCode >= 500 ? 'error' : response.statusCode >= 400 ? 'warn' : 'info',
+    customLogLevel: (_request, response, error) => (error || response.statusCode >= 500 ? 'error' : 'info'),
     serializers: {
       req: (request: { id: unknown; method: string; url: string; originalUrl?: string }) => ({
         id: request.id,
