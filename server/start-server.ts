@@ -99,7 +99,7 @@ async function createDeps(
     events: new EventHub(),
     evidenceCache: createEvidenceCache(),
     evaluation: createEvaluation(logger),
-    renderer: createReportRenderer(),
+    renderer: createReportRenderer(logger),
     client: client?.handler ?? null,
   };
 }
