@@ -13,7 +13,7 @@ interface TableProps {
 /** Close-set rows under one ink line; a wide table scrolls in its own frame. */
 export function Table({ caption, isCaptionSeen = false, head, children, className }: TableProps) {
   return (
-    <div className={classNames('overflow-x-auto', className)}>
+    <div className={classNames('relative overflow-x-auto', className)}>
       <table className="w-full border-collapse text-sm">
         <caption className={isCaptionSeen ? 'pb-1 text-left text-xs text-ink-2' : 'sr-only'}>
           {caption}

@@ -51,7 +51,7 @@ export function EquationField({
         />
       </div>
       {view?.latex && (
-        <p className="overflow-x-auto py-2 text-report">
+        <p className="relative overflow-x-auto py-2 text-report">
           <Katex latex={view.latex} />
         </p>
       )}

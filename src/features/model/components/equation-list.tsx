@@ -21,7 +21,7 @@ export function EquationList({ model }: { readonly model: Model }) {
             <dt className="w-26 flex-none text-xs text-ink-3">
               {quantity?.name ?? 'a quantity that is gone'}
             </dt>
-            <dd className="min-w-0 flex-1 overflow-x-auto py-1">
+            <dd className="relative min-w-0 flex-1 overflow-x-auto py-1">
               {latex ? <Katex latex={latex} /> : <code className="font-code text-sm">{typed}</code>}
             </dd>
             {fault && (

@@ -61,7 +61,7 @@ export function TrialsTable({ view, scale, onCorrect, onEnter }: TrialsTableProp
   const drawn = isVirtual ? seen.flatMap(({ index }) => rows[index] ?? []) : rows;
   return (
     <div
-      className="overflow-x-auto"
+      className="relative overflow-x-auto"
       role="region"
       aria-label={`Trials of series ${view.series.letter}`}
       tabIndex={0}
