@@ -1,8 +1,8 @@
 import type { Ref } from 'react';
 
 /**
- * Between the page and what lies on top of it. Plain, because the library's own holds the page still by putting
- * a style element into it, which the content policy forbids; `data-scrim` does the same from the style sheet.
+ * Between the page and what lies on top of it. The library's own would hold the page still with a style element;
+ * `data-scrim` does it from our style sheet, without the page jumping sideways on a phone.
  */
 export function Scrim({ ref }: { readonly ref?: Ref<HTMLDivElement> }) {
   return (
