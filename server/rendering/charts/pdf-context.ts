@@ -1,133 +1,18 @@
 import { shapeText, stackHeights } from '../fonts/shape-text.ts';
 import { fillColour, length, parseColour, strokeColour } from '../pdf/operators.ts';
-import type { PdfWriter } from '../pdf/pdf-writer.ts';
 import { TextPen } from '../pdf/text-pen.ts';
 import { canvasFont } from './canvas-font.ts';
-import { PathBuilder, type Matrix } from './path-builder.ts';
-
-interface PenState {
-  readonly matrix: Matrix;
-  readonly fillStyle: unknown;
-  readonly strokeStyle: unknown;
-  readonly lineWidth: number;
-  readonly lineCap: string;
-  readonly lineJoin: string;
-  readonly dash: readonly number[];
-  readonly dashOffset: number;
-  readonly alpha: number;
-  readonly font: string;
-  readonly textAlign: unknown;
-  readonly textBaseline: unknown;
-}
+import { CanvasState } from './canvas-state.ts';
+import { PathBuilder } from './path-builder.ts';
 
 const CAPS: Readonly<Record<string, number>> = { butt: 0, round: 1, square: 2 };
 const JOINS: Readonly<Record<string, number>> = { miter: 0, round: 1, bevel: 2 };
 /** Distance of a circle's control points as a share of its radius. */
 const CIRCLE = 0.5523;
 
-/**
- * The part of CanvasRenderingContext2D that Chart.js and our plugins use, writing PDF operators. Transforms are kept
- * here and points transformed as they come, so that the page sees only paths, text, q and Q. As in browsers, values
- * that make no sense are ignored.
- */
-export class PdfContext {
-  fillStyle: unknown = '#000000';
-  strokeStyle: unknown = '#000000';
-  lineCap = 'butt';
-  lineJoin = 'miter';
-  miterLimit = 10;
-  font = '12px sans-serif';
-  textAlign: unknown = 'left';
-  textBaseline: unknown = 'alphabetic';
-  direction = 'ltr';
-  globalCompositeOperation = 'source-over';
-  private width = 1;
-  private dash: readonly number[] = [];
-  private dashOffset = 0;
-  private alpha = 1;
-  private readonly base: Matrix;
-  private matrix: Matrix;
+/** The part of CanvasRenderingContext2D that Chart.js and our plugins use, writing PDF operators. */
+export class PdfContext extends CanvasState {
   private path = new PathBuilder();
-  private readonly saved: PenState[] = [];
-
-  /** @param scale - points for each CSS pixel */
-  constructor(
-    readonly canvas: unknown,
-    private readonly writer: PdfWriter,
-    x: number,
-    y: number,
-    scale: number,
-  ) {
-    this.base = [scale, 0, 0, scale, x, y];
-    this.matrix = this.base;
-  }
-
-  get lineWidth(): number {
-    return this.width;
-  }
-  set lineWidth(value: number) {
-    if (value > 0 && Number.isFinite(value)) this.width = value;
-  }
-  get lineDashOffset(): number {
-    return this.dashOffset;
-  }
-  set lineDashOffset(value: number) {
-    if (Number.isFinite(value)) this.dashOffset = value;
-  }
-  get globalAlpha(): number {
-    return this.alpha;
-  }
-  set globalAlpha(value: number) {
-    if (value >= 0 && value <= 1) this.alpha = value;
-  }
-
-  save(): void {
-    const { matrix, fillStyle, strokeStyle, lineCap, lineJoin, dash, dashOffset, alpha, font } = this;
-    const { textAlign, textBaseline, width: lineWidth } = this;
-    this.saved.push({
-      ...{ matrix, fillStyle, strokeStyle, lineWidth, lineCap, lineJoin, dash, dashOffset, alpha, font },
-      ...{ textAlign, textBaseline },
-    });
-    this.writer.write('q');
-  }
-
-  restore(): void {
-    const state = this.saved.pop();
-    if (!state) return;
-    const { lineWidth, ...rest } = state;
-    Object.assign(this, rest);
-    this.width = lineWidth;
-    this.writer.write('Q');
-  }
-
-  transform(a: number, b: number, c: number, d: number, e: number, f: number): void {
-    const m = this.matrix;
-    this.matrix = [
-      m[0] * a + m[2] * b,
-      m[1] * a + m[3] * b,
-      m[0] * c + m[2] * d,
-      m[1] * c + m[3] * d,
-      m[0] * e + m[2] * f + m[4],
-      m[1] * e + m[3] * f + m[5],
-    ];
-  }
-  translate(x: number, y: number): void {
-    this.transform(1, 0, 0, 1, x, y);
-  }
-  scale(x: number, y: number): void {
-    this.transform(x, 0, 0, y, 0, 0);
-  }
-  rotate(angle: number): void {
-    const [cos, sin] = [Math.cos(angle), Math.sin(angle)];
-    this.transform(cos, sin, -sin, cos, 0, 0);
-  }
-  setTransform(a: number, b: number, c: number, d: number, e: number, f: number): void {
-    this.matrix = this.base;
-    this.transform(a, b, c, d, e, f);
-  }
-  resetTransform(): void {
-    this.matrix = this.base;
-  }
 
   beginPath(): void {
     this.path = new PathBuilder();
@@ -191,15 +76,6 @@ export class PdfContext {
     // Paper is white already.
   }
 
-  setLineDash(lengths: readonly number[]): void {
-    const dash = [...lengths].map(Number);
-    if (dash.some((part) => !(part >= 0) || !Number.isFinite(part))) return;
-    this.dash = dash.length % 2 === 1 ? [...dash, ...dash] : dash;
-  }
-  getLineDash(): readonly number[] {
-    return this.dash;
-  }
-
   measureText(text: string) {
     const { size, stack } = canvasFont(this.font);
     const width = shapeText(stack, text).width * size;
@@ -246,11 +122,6 @@ export class PdfContext {
     if (this.textBaseline === 'top' || this.textBaseline === 'hanging') return ascent * size;
     if (this.textBaseline === 'bottom' || this.textBaseline === 'ideographic') return -descent * size;
     return 0;
-  }
-
-  private scaleOfLines(): number {
-    const [a, b, c, d] = this.matrix;
-    return Math.sqrt(Math.abs(a * d - b * c));
   }
 
   private withPath(draw: () => void): void {

@@ -32,14 +32,20 @@ export interface TableContent {
 const GUTTER = 14;
 const PAD = 2.4;
 const NATURAL = 1e5;
+/** Most that a column is widened where there is room: rows are read across. */
+const MOST_AIR = 40;
 
-/** Draws a table as wide as the text; its head is repeated where it goes on over a page. */
+/** Draws a table, at most as wide as the text; its head is repeated where it goes on over a page. */
 export function drawTable(table: TableContent, element: StructureElement, context: RenderContext): void {
   const all = table.head ? [table.head, ...table.rows] : table.rows;
   const widths = columnWidths(all, table.aligns.length, context.width);
+  const total = spanWidth(widths, 0, widths.length);
   const set = (row: TableRow) => setRow(row, table.aligns, widths);
   const head = table.head ? set(table.head) : null;
-  const rows = table.rows.map(set);
+  // The last row never stands alone on a page.
+  const rows = table.rows.map((row, i) =>
+    set(i === table.rows.length - 2 ? { ...row, keepsWithNext: true } : row),
+  );
   const { writer, flow, left } = context;
   const headHeight = head?.height ?? 0;
   flow.begin(0, headHeight + heightTogether(rows, 0, 2));
@@ -47,7 +53,7 @@ export function drawTable(table: TableContent, element: StructureElement, contex
   if (head && section) {
     drawRow(writer, head, widths, left, flow.y, section);
     flow.y += head.height;
-    line(writer, left, flow.y, context.width, INK, INK_LINE);
+    line(writer, left, flow.y, total, INK, INK_LINE);
   }
   section = part('TBody', element, writer);
   rows.forEach((row, i) => {
@@ -57,12 +63,12 @@ export function drawTable(table: TableContent, element: StructureElement, contex
       if (head) {
         writer.artifact('Pagination', () => drawRow(writer, head, widths, left, flow.y, null));
         flow.y += head.height;
-        line(writer, left, flow.y, context.width, INK, INK_LINE);
+        line(writer, left, flow.y, total, INK, INK_LINE);
       }
     }
     drawRow(writer, row, widths, left, flow.y, section);
     flow.y += row.height;
-    line(writer, left, flow.y, context.width, HAIR, HAIR_LINE);
+    line(writer, left, flow.y, total, HAIR, HAIR_LINE);
   });
 }
 
@@ -124,10 +130,27 @@ function setRow(row: TableRow, aligns: readonly CellAlign[], widths: readonly nu
 }
 
 /**
- * Widths of the columns: each as wide as its longest line where all of them fit, the rest shared out; else between
- * its longest word and its longest line.
+ * Widths of the columns: each as wide as its longest line where all of them fit, the rest shared out. Else the narrow
+ * ones stay whole, and the wide ones share what is left, none narrower than its longest word.
  */
 function columnWidths(rows: readonly TableRow[], count: number, width: number): number[] {
+  const { natural, least } = measureColumns(rows, count);
+  const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0);
+  const wanted = sum(natural);
+  if (wanted <= width) return natural.map((one) => one + Math.min(MOST_AIR, (width - wanted) / count));
+  const narrowFirst = natural.map((_, i) => i).toSorted((a, b) => (natural[a] ?? 0) - (natural[b] ?? 0));
+  const widths = new Array<number>(count).fill(0);
+  let left = width;
+  narrowFirst.forEach((column, i) => {
+    const share = left / (count - i);
+    widths[column] = Math.max(Math.min(natural[column] ?? 0, share), least[column] ?? 0);
+    left -= widths[column] ?? 0;
+  });
+  const scale = Math.min(1, width / sum(widths));
+  return widths.map((one) => one * scale);
+}
+
+function measureColumns(rows: readonly TableRow[], count: number) {
   const natural = new Array<number>(count).fill(0);
   const least = new Array<number>(count).fill(0);
   for (const row of rows) {
@@ -142,12 +165,7 @@ function columnWidths(rows: readonly TableRow[], count: number, width: number): 
       column += span;
     }
   }
-  const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0);
-  const [wanted, needed] = [sum(natural), sum(least)];
-  if (wanted <= width) return natural.map((one) => one + (width - wanted) / count);
-  if (needed >= width) return least.map((one) => (one * width) / needed);
-  const share = (width - needed) / (wanted - needed);
-  return natural.map((one, i) => (least[i] ?? 0) + (one - (least[i] ?? 0)) * share);
+  return { natural, least };
 }
 
 function drawRow(

@@ -81,7 +81,7 @@ function liveValueRuns(node: LiveValueNode, face: TextFace, context: InlineConte
   const colour = hueColour(shown.hue);
   const style = textStyle(face, stack, colour);
   const symbol = shown.symbol === null ? [] : formulaRuns(symbolToLatex(shown.symbol), face, colour);
-  const equals = shown.symbol === null ? '' : '\u2009=\u2009';
+  const equals = shown.symbol === null ? '' : '\u00a0=\u00a0';
   const value: TextRun = { kind: 'text', text: `${equals}${shown.value}`, style, whole: true };
   return [...symbol, value, letterRun(sources.letter(ref), face)];
 }

@@ -1,6 +1,8 @@
 import type { Evidence, ValueReference } from '#shared/evidence/evidence.ts';
 import { findValue } from '#shared/evidence/find-value.ts';
 import type { Findings, Scalar } from '#shared/evidence/findings.ts';
+import { registerOf } from '#shared/evidence/register.ts';
+import { describeSource, type EvaluatedFreedom } from '#shared/evidence/sources.ts';
 import { countInWords } from '#shared/evidence/words.ts';
 import type { NumberSource, NumberSources } from './number-sources.ts';
 
@@ -20,6 +22,8 @@ interface Facts {
 const MOST_NAMES = 6;
 /** Smaller shares of u² are not told. */
 const LEAST_SHARE = 0.01;
+/** Only the words of a source are asked for here. */
+const FREEDOM: EvaluatedFreedom = { ofMean: () => Infinity, ofFit: () => Infinity };
 
 export function sourceWords(number: NumberSource, facts: Facts): SourceWords {
   const value = findValue(facts.findings, facts.evidence, number.ref);
@@ -130,12 +134,14 @@ function inUncertainties(value: Scalar): string {
 }
 
 /** "fit to series A 85 %, steel rule 15 % of u²": sources with the same words together, the largest first. */
-function shares(value: Scalar, { findings }: Facts): string {
+function shares(value: Scalar, { evidence, findings }: Facts): string {
+  const register = registerOf(evidence);
   const total = value.parts.reduce((sum, part) => sum + part.c * part.c, 0);
   if (!(total > 0)) return '';
   const byWords = new Map<string, number>();
   for (const part of value.parts) {
-    const words = findings.sources.get(part.source)?.words ?? part.source;
+    const words =
+      findings.sources.get(part.source)?.words ?? describeSource(register, part.source, FREEDOM).words;
     byWords.set(words, (byWords.get(words) ?? 0) + (part.c * part.c) / total);
   }
   const told = [...byWords]

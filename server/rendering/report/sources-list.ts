@@ -1,9 +1,11 @@
+import { symbolToText } from '#shared/formatting/symbol.ts';
 import type { InlineRun } from '../text/inline-run.ts';
 import { drawLines, LinesOwner } from '../text/draw-lines.ts';
 import { drawTable, type TableRow } from './draw-table.ts';
 import { sourceWords } from './number-source-words.ts';
 import { CELL, CELL_HEAD, HEADINGS, hueColour, textStyle } from './print-style.ts';
 import type { RenderContext } from './render-context.ts';
+import { symbolWords } from './symbol-words.ts';
 import { layOutLines } from './text-block.ts';
 
 const TITLE = 'Where the numbers come from';
@@ -25,6 +27,7 @@ export function drawSourcesList(context: RenderContext): void {
   const element = writer.element('Table');
   context.element.add(element);
   const head: TableRow = { cells: ['', 'Value', 'Source', 'Reduction'].map(headCell) };
+  const symbols = new Set(context.evidence.quantities.map((row) => symbolToText(row.symbol)));
   const rows = sources.all.map((number): TableRow => {
     const { source, reduction } = sourceWords(number, context);
     const value = textStyle(CELL, 'ui', hueColour(number.shown.hue));
@@ -32,8 +35,8 @@ export function drawSourcesList(context: RenderContext): void {
       cells: [
         { runs: [plain(number.letter)] },
         { runs: [{ kind: 'text', text: number.shown.text, style: value, whole: true }] },
-        { runs: wordRuns(source) },
-        { runs: wordRuns(reduction) },
+        { runs: symbolWords(source, CELL) },
+        { runs: symbolWords(reduction, CELL, symbols) },
       ],
     };
   });
@@ -49,16 +52,4 @@ function headCell(text: string) {
 
 function plain(text: string): InlineRun {
   return { kind: 'text', text, style: textStyle(CELL) };
-}
-
-/** Words with the symbol u in the report's italic. */
-function wordRuns(text: string): InlineRun[] {
-  return text
-    .split(/(?<=\s)(u)(?=²|$)/u)
-    .filter((piece) => piece !== '')
-    .map((piece) => ({
-      kind: 'text',
-      text: piece,
-      style: textStyle(CELL, piece === 'u' ? 'bodyItalic' : 'ui'),
-    }));
 }

@@ -17,6 +17,8 @@ interface VerdictDrawing {
   readonly ground: string | null;
   readonly fills: readonly string[];
   readonly strokes: readonly string[];
+  /** Short strokes with square ends, so that they stay apart. */
+  readonly dashes?: readonly string[];
 }
 
 /** The vessel of each verdict: full, with a hole and a drop, with a dashed line. */
@@ -37,7 +39,8 @@ const DRAWINGS: Readonly<Record<Verdict, VerdictDrawing>> = {
     colour: INK_2,
     ground: null,
     fills: [],
-    strokes: [VESSEL, 'M4.6 7.6H6.2', 'M7.2 7.6H8.8', 'M9.8 7.6H11.4'],
+    strokes: [VESSEL],
+    dashes: ['M4.6 7.6H6.2', 'M7.2 7.6H8.8', 'M9.8 7.6H11.4'],
   },
 };
 
@@ -47,7 +50,7 @@ export function verdictColour(verdict: Verdict): string {
 
 /** Operators that draw a verdict's vessel in a square with its upper left corner at (x, y). */
 export function verdictOperators(verdict: Verdict, x: number, y: number, side: number): string {
-  const { colour, ground, fills, strokes } = DRAWINGS[verdict];
+  const { colour, ground, fills, strokes, dashes = [] } = DRAWINGS[verdict];
   const scale = factor(side / SIDE);
   return [
     `q ${scale} 0 0 ${scale} ${length(x)} ${length(y)} cm`,
@@ -56,6 +59,8 @@ export function verdictOperators(verdict: Verdict, x: number, y: number, side: n
     fillColour(colour),
     ...fills.map((path) => `${pathOperators(path)} f`),
     ...strokes.map((path) => `${pathOperators(path)} S`),
+    '0 J',
+    ...dashes.map((path) => `${pathOperators(path)} S`),
     'Q',
   ].join('\n');
 }

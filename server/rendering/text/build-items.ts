@@ -33,6 +33,9 @@ export function wordSpace(style: TextStyle): number {
   return shapeText(style.stack, ' ').width * style.size;
 }
 
+/** Room for the dashed box at each side of what it holds. */
+export const DASHED_ROOM = 2;
+
 export function textBox(run: TextRun, text: string): BoxContent {
   const shaped = shapeText(run.style.stack, text);
   const heights = stackHeights(run.style.stack);
@@ -41,7 +44,7 @@ export function textBox(run: TextRun, text: string): BoxContent {
     kind: 'text',
     run,
     shaped,
-    width: shaped.width * size,
+    width: shaped.width * size + (run.dashed === undefined ? 0 : 2 * DASHED_ROOM),
     ascent: heights.ascent * LETTER_ASCENT * size + Math.max(0, rise),
     descent: heights.descent * size,
   };

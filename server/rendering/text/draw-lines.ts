@@ -4,7 +4,7 @@ import { fillColour, length, strokeColour } from '../pdf/operators.ts';
 import type { StructureElement } from '../pdf/pdf-document.ts';
 import type { PdfWriter } from '../pdf/pdf-writer.ts';
 import { TextPen } from '../pdf/text-pen.ts';
-import { wordSpace } from './build-items.ts';
+import { DASHED_ROOM, wordSpace } from './build-items.ts';
 import type { FormulaRun, RunElement, TextRun, TextStyle } from './inline-run.ts';
 import type { Segment, TextLine } from './layout-paragraph.ts';
 
@@ -14,7 +14,7 @@ const UNDERLINE = 0.5;
 const UNDERLINE_DROP = 0.18;
 const LINK_HEIGHT = 1.2;
 const LINK_ASCENT = 0.92;
-const DASH = { width: 0.8, pattern: '[2 1.6] 0 d', padX: 1.6, ascent: 0.82, descent: 0.3 };
+const DASH = { width: 0.8, pattern: '[2 1.6] 0 d', ascent: 0.82, descent: 0.3 };
 
 /** Where the lines of one text go, and the structure element they belong to; null: they are an artifact. */
 export interface LinesPlace {
@@ -109,7 +109,8 @@ function drawSegments(writer: PdfWriter, segments: readonly Segment[], x: number
     }
     const { style } = box.run;
     const baseline = y - (style.rise ?? 0);
-    pen.text(box.shaped, style.size, left, baseline, style.colour);
+    const inset = box.run.dashed === undefined ? 0 : DASHED_ROOM;
+    pen.text(box.shaped, style.size, left + inset, baseline, style.colour);
     if (space) pen.text(shapeText(style.stack, ' '), style.size, left + box.width, baseline, style.colour);
     if (box.run.underline !== undefined) {
       pen.end();
@@ -134,12 +135,7 @@ function dashedBox(
   colour: string,
 ): void {
   const { size } = style;
-  const box = [
-    x - DASH.padX,
-    y - DASH.ascent * size,
-    width + 2 * DASH.padX,
-    (DASH.ascent + DASH.descent) * size,
-  ];
+  const box = [x, y - DASH.ascent * size, width, (DASH.ascent + DASH.descent) * size];
   const outline = `${box.map(length).join(' ')} re S`;
   writer.write(`q ${strokeColour(colour)} ${DASH.width} w ${DASH.pattern} ${outline} Q`);
 }

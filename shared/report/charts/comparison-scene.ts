@@ -128,7 +128,10 @@ function measuredSeries(
     if (known) known.push(drawn);
     else byLetter.set(letter, [drawn]);
   });
-  return [...byLetter].map(([letter, points]) => ({ letter, points }));
+  // The series that the chart is mostly about comes first, and so has the plain points.
+  return [...byLetter]
+    .map(([letter, points]) => ({ letter, points }))
+    .toSorted((a, b) => b.points.length - a.points.length);
 }
 
 function seriesLetter(point: ComparisonPoint, evidence: Evidence): string {

@@ -132,8 +132,12 @@ function besidePoint(x: number, y: number, width: number, gap: number): LabelCan
     { box: boxAt(x - gap - width, y + 4, width), cost: 3 },
     { box: boxAt(x - width / 2, y + ASCENT + gap + 4, width), cost: 4 },
     { box: boxAt(x - width / 2, y - gap - DESCENT - 2, width), cost: 5 },
-    { box: boxAt(x - width / 2, y + ASCENT + 2 * gap, width), cost: 6 },
+    { box: boxAt(x + gap, y + ASCENT + gap, width), cost: 6 },
+    { box: boxAt(x + gap, y - gap - DESCENT, width), cost: 6 },
+    { box: boxAt(x - width / 2, y + ASCENT + 2 * gap, width), cost: 7 },
     { box: boxAt(x - width / 2, y - 2 * gap - DESCENT, width), cost: 7 },
+    { box: boxAt(x - 6, y - 2 * gap, width), cost: 8 },
+    { box: boxAt(x - 6, y - 3 * gap, width), cost: 9 },
   ];
 }
 

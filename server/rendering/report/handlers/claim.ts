@@ -8,11 +8,13 @@ import { noticeBlock } from '../notice.ts';
 import { CLAIM, CLAIM_WHY, INK, INK_LINE, RULE, HAIR_LINE, textStyle } from '../print-style.ts';
 import type { BlockHandler, RenderContext } from '../render-context.ts';
 import { layOutLines } from '../text-block.ts';
+import { symbolWords } from '../symbol-words.ts';
 import { verdictColour, verdictOperators } from '../verdict-mark.ts';
 
 const SPACE_ABOVE = 11;
 const SPACE_BELOW = 10;
 const PAD = 6;
+const WHY_GAP = 2;
 const ICON = 13.5;
 const ICON_GAP = 4.5;
 const VERDICT_SIZE = 10.5;
@@ -34,8 +36,8 @@ export const claim: BlockHandler<ClaimNode> = (node, context) => {
     CLAIM,
     width - verdictWidth - GAP,
   );
-  const why = view.why === '' ? null : layOutLines(run(view.why, CLAIM_WHY), CLAIM_WHY, width);
-  const height = PAD + sentence.height + (why?.height ?? 0) + PAD;
+  const why = view.why === '' ? null : layOutLines(symbolWords(view.why, CLAIM_WHY), CLAIM_WHY, width);
+  const height = PAD + sentence.height + (why ? WHY_GAP + why.height : 0) + PAD;
   flow.begin(SPACE_ABOVE, height);
   const top = flow.y;
   rule(context, top, INK, INK_LINE);
@@ -59,7 +61,7 @@ export const claim: BlockHandler<ClaimNode> = (node, context) => {
     pen.text(verdict, VERDICT_SIZE, x + ICON + ICON_GAP, baseline, verdictColour(view.verdict));
     pen.end();
   });
-  if (why) paragraph(why.lines, top + PAD + sentence.height);
+  if (why) paragraph(why.lines, top + PAD + sentence.height + WHY_GAP);
   flow.y = top + height;
   rule(context, flow.y, RULE, HAIR_LINE);
   flow.y += SPACE_BELOW;
