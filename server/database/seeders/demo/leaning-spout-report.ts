@@ -45,7 +45,7 @@ export function leaningSpoutReport(evidence: Evidence): ReportDocument {
     ],
     Experiment: [
       p`The can stands on a wedge that is clamped to the bench. Lean is read on a protractor, head on a steel rule fixed inside the can, and range on a ruled tray that is kept level. Every reading has its own uncertainty; the zero of the tray is common to all of them, so it never averages away.`,
-      p`Series A holds the can upright and lets it drain. It serves to find ${tex('C_\\mathrm{v}')} and nothing else. Series B keeps the head at ${held('h')} and varies the lean; each lean was set anew for every trial. Together they are ${live({ kind: 'count', of: 'trials' })} trials, of which ${live({ kind: 'count', of: 'excluded' })} is excluded: in B11 the can slid back and the range was read from the old mark. It stays in the table and in the chart, hollow.`,
+      p`Series A holds the can upright and lets it drain. It serves to find ${tex('C_\\mathrm{v}')} and nothing else. Series B keeps the head at ${held('h')} and varies the lean; each lean was set anew for every trial. Together they are ${live({ kind: 'count', of: 'trials' })}, of which ${live({ kind: 'count', of: 'excluded' })} is excluded: in B11 the can slid back and the range was read from the old mark. It stays in the table and in the chart, hollow.`,
       table(
         'B',
         'tableb',
