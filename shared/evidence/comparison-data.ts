@@ -7,6 +7,7 @@ import type { ComparisonFinding, Fault } from './findings.ts';
 import { symbolName } from './register.ts';
 import { createScope, notDefined } from './scope.ts';
 import { gather, inRange, selectTrials, siRange, type Pick, type SiRange } from './selected-trials.ts';
+import { keptTrials } from './series-trials.ts';
 import { rowOf, type Uncertain } from './uncertain.ts';
 
 /** A parameter as a comparison lets it go. */
@@ -57,9 +58,10 @@ export function comparisonData(
     if (isFault(range)) return faulty(range);
     limits.push(range);
   }
-  const kept = selected.filter(({ id }) => run.register.trials.get(id)?.excluded === undefined);
+  const isKept = ({ series, row }: Pick): boolean => keptTrials(run, series)[row] === true;
+  const kept = selected.filter(isKept);
   const outside: { trial: string; why: 'excluded' | 'outside trust' | 'incomplete' }[] = selected
-    .filter(({ id }) => run.register.trials.get(id)?.excluded !== undefined)
+    .filter((pick) => !isKept(pick))
     .map(({ id }) => ({ trial: id, why: 'excluded' }));
   if (kept.length === 0) return faulty(noTrials(comparison, selected.length), outside);
   const whole = sideColumns(run, { comparison, model, free, limits }, kept);

@@ -93,7 +93,7 @@ function freeParameters(run: Evaluation, comparison: Comparison): readonly FreeP
     const read = (reading: Reading | null, what: string): number | undefined | Fault => {
       if (reading === null) return undefined;
       const checked = checkedReading(run.register, reading, quantity, {
-        words: words(what),
+        words: () => words(what),
         at: comparison.id,
       });
       return 'shape' in checked ? checked : checked.value;

@@ -56,22 +56,22 @@ function ownerOf(register: Register, quantity: Quantity, words: string, at: stri
   return { words, at, symbol, unit: unit.unit };
 }
 
-/** A reading in SI, refused where it cannot be read or is of another kind than its quantity. */
+/** A reading in SI, refused where it cannot be read or is of another kind than its quantity; `words` name it then. */
 export function checkedReading(
   register: Register,
   reading: Reading,
   quantity: Quantity,
-  where: { readonly words: string; readonly at: string },
+  where: { readonly words: () => string; readonly at: string },
 ): { readonly value: number; readonly u: number | null } | Fault {
   const unit = parseUnit(quantity.unit);
   if (!unit.ok)
     return fault(unit.code, `${symbolName(register, quantity.id)}: ${unit.sentence}`, quantity.id);
   const read = readValue(reading);
-  if (!read.ok) return fault(read.code, `${where.words}: ${read.sentence}`, where.at);
+  if (!read.ok) return fault(read.code, `${where.words()}: ${read.sentence}`, where.at);
   if (sameDimension(read.unit.dimension, unit.unit.dimension)) return read;
   return fault(
     'dimension mismatch',
-    `${where.words} is given in ${reading.unit}, but ${symbolName(register, quantity.id)} is in ${quantity.unit}. Give it in a unit of the same kind.`,
+    `${where.words()} is given in ${reading.unit}, but ${symbolName(register, quantity.id)} is in ${quantity.unit}. Give it in a unit of the same kind.`,
     where.at,
   );
 }
@@ -83,7 +83,7 @@ export function checkedReading(
 export function singleValue(register: Register, single: SingleReading): Uncertain | Fault {
   const { reading, quantity, source } = single;
   const symbol = symbolName(register, quantity.id);
-  const read = checkedReading(register, reading, quantity, { words: symbol, at: single.at });
+  const read = checkedReading(register, reading, quantity, { words: () => symbol, at: single.at });
   if ('shape' in read) return read;
   const instrument = partsOfInstrument(register, single.instrument, quantity);
   if ('shape' in instrument) return instrument;

@@ -17,6 +17,7 @@ import { quantityKey } from './keys.ts';
 import { registerFinding } from './register-finding.ts';
 import { variationOf } from './register-value.ts';
 import { freedomInRun, runValues } from './run-values.ts';
+import { seriesTrials } from './series-trials.ts';
 import { describeSource } from './sources.ts';
 import { summaryQuantity } from './summary-value.ts';
 import type { Values } from './values.ts';
@@ -37,7 +38,7 @@ export function evaluate(evidence: Evidence, cache: EvaluationCache = createEval
     fitFreedom,
   });
   const values = runValues(run);
-  const register = registerValues(run, values);
+  const places = placesOf(run, values);
   const groups = new Map<string, readonly Group[]>(evidence.series.map(({ id }) => [id, values.groups(id)]));
   const comparisons = new Map<string, ComparisonFinding>(
     evidence.comparisons.map((comparison) => [comparison.id, comparisonFinding(run, values, comparison)]),
@@ -46,49 +47,65 @@ export function evaluate(evidence: Evidence, cache: EvaluationCache = createEval
     evidence.charts.map((chart) => [chart.id, chartFinding(run, values, chart, comparisons)]),
   );
   const claims = new Map<string, ClaimFinding>();
-  const sources = sourcesOf(run, values, register);
   const findings: Findings = {
     version: evidence.version,
-    values: register,
-    sources,
+    values: new Map(places.flatMap(({ findings }) => [...findings])),
+    sources: new Map(places.flatMap(({ sources }) => [...sources])),
     groups,
     comparisons,
     claims,
     charts,
   };
   for (const claim of evidence.claims) claims.set(claim.id, judgeClaim(claim, evidence, findings));
-  cache.nodes = run.nodes;
   return findings;
 }
 
-/** Every register quantity outside of all series, and inside those where its value differs. */
-function registerValues(run: Evaluation, values: Values): Map<string, Finding> {
+/** Findings of one place, and the sources that they name. */
+interface PlaceFindings {
+  readonly findings: ReadonlyMap<string, Finding>;
+  readonly sources: ReadonlyMap<string, Source>;
+}
+
+/** Every register quantity outside of all series, then inside those where its value differs. */
+function placesOf(run: Evaluation, values: Values): readonly PlaceFindings[] {
+  const { quantities, series, models, instruments, comparisons } = run.evidence;
+  const outside = new Map(quantities.map(({ id }) => [id, registerFinding(run, values, id, null)]));
+  const differing = quantities.filter(({ id }) => variationOf(run, id).differsBySeries).map(({ id }) => id);
+  const common = [quantities, models, instruments, comparisons, differing.join(' '), ...outside.values()];
+  const inside = series.map((row) =>
+    run.node<PlaceFindings>(
+      `place@${row.id}`,
+      () => [row, seriesTrials(run, row.id), ...common],
+      () => withSources(run, values, inSeries(run, values, differing, row.id)),
+    ),
+  );
+  return [withSources(run, values, outside), ...inside];
+}
+
+/** What a series gives no value for is left out: there it is neither read nor held. */
+function inSeries(
+  run: Evaluation,
+  values: Values,
+  ids: readonly string[],
+  series: string,
+): Map<string, Finding> {
   const found = new Map<string, Finding>();
-  for (const { id } of run.evidence.quantities) {
-    found.set(id, registerFinding(run, values, id, null));
-    if (!variationOf(run, id).differsBySeries) continue;
-    for (const { id: series } of run.evidence.series) {
-      const inside = registerFinding(run, values, id, series);
-      if (inside.shape !== 'fault' || !run.register.series.has(inside.at))
-        found.set(quantityKey(id, series), inside);
-    }
+  for (const id of ids) {
+    const finding = registerFinding(run, values, id, series);
+    const isElsewhere = finding.shape === 'fault' && run.register.series.has(finding.at);
+    if (!isElsewhere) found.set(quantityKey(id, series), finding);
   }
   return found;
 }
 
-/** Every source that a register value names, in words. */
-function sourcesOf(
-  run: Evaluation,
-  values: Values,
-  register: ReadonlyMap<string, Finding>,
-): Map<string, Source> {
+function withSources(run: Evaluation, values: Values, findings: ReadonlyMap<string, Finding>): PlaceFindings {
   const sources = new Map<string, Source>();
   const evaluated = freedomInRun(run, values);
-  for (const finding of register.values()) {
+  for (const finding of findings.values()) {
     const named =
       finding.shape === 'scalar' ? finding.parts : finding.shape === 'column' ? finding.shared : [];
     for (const { source } of named)
       if (!sources.has(source)) sources.set(source, describeSource(run.register, source, evaluated));
   }
-  return sources;
+  return { findings, sources };
 }

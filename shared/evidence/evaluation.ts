@@ -3,20 +3,23 @@ import type { Fault, MadeOf } from './findings.ts';
 import { registerOf, type Register } from './register.ts';
 import type { Uncertain } from './uncertain.ts';
 
-/** What a node was made from, and what came out. */
-export interface CachedNode {
+/** What a node was made from, what came out, and the run that last found it valid. */
+interface CachedNode {
   readonly inputs: readonly unknown[];
   readonly value: unknown;
+  run: number;
 }
 
 /** What one evaluation leaves for the next, so that only what changed is computed anew. Keep one for each problem. */
 export interface EvaluationCache {
-  nodes: ReadonlyMap<string, CachedNode>;
+  readonly nodes: Map<string, CachedNode>;
+  /** Evaluations made with it. */
+  runs: number;
 }
 
 /** An empty cache. */
 export function createEvaluationCache(): EvaluationCache {
-  return { nodes: new Map() };
+  return { nodes: new Map(), runs: 0 };
 }
 
 /** A node as the evaluation before left it. */
@@ -49,8 +52,8 @@ export interface Solvers {
  */
 export class Evaluation {
   readonly register: Register;
-  readonly #earlier: ReadonlyMap<string, CachedNode>;
-  readonly #nodes = new Map<string, CachedNode>();
+  readonly #nodes: Map<string, CachedNode>;
+  readonly #run: number;
 
   constructor(
     evidence: Evidence,
@@ -58,15 +61,13 @@ export class Evaluation {
     readonly solvers: Solvers,
   ) {
     this.register = registerOf(evidence);
-    this.#earlier = cache.nodes;
+    this.#nodes = cache.nodes;
+    cache.runs += 1;
+    this.#run = cache.runs;
   }
 
   get evidence(): Evidence {
     return this.register.evidence;
-  }
-
-  get nodes(): ReadonlyMap<string, CachedNode> {
-    return this.#nodes;
   }
 
   /**
@@ -77,17 +78,22 @@ export class Evaluation {
    * @param compute - may return the earlier value itself when the new one is equal
    */
   node<T>(key: string, inputs: () => readonly unknown[], compute: (earlier: Earlier<T> | undefined) => T): T {
-    const made = this.#nodes.get(key);
-    if (made !== undefined) return made.value as T;
+    const known = this.#nodes.get(key);
+    if (known?.run === this.#run) return known.value as T;
     const from = inputs();
-    const earlier = this.#earlier.get(key) as (CachedNode & Earlier<T>) | undefined;
-    const value = earlier !== undefined && sameItems(earlier.inputs, from) ? earlier.value : compute(earlier);
-    this.#nodes.set(key, { inputs: from, value });
+    if (known !== undefined && sameItems(known.inputs, from)) {
+      known.run = this.#run;
+      return known.value as T;
+    }
+    const value = compute(known as Earlier<T> | undefined);
+    this.#nodes.set(key, { inputs: from, value, run: this.#run });
     return value;
   }
 }
 
 /** Whether two lists hold the very same things in the same order. */
 export function sameItems(a: readonly unknown[], b: readonly unknown[]): boolean {
-  return a.length === b.length && a.every((element, i) => Object.is(element, b[i]));
+  if (a.length !== b.length) return false;
+  for (let i = 0; i < a.length; i++) if (!Object.is(a[i], b[i])) return false;
+  return true;
 }

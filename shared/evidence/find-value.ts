@@ -37,11 +37,20 @@ export function findValue(findings: Findings, evidence: Evidence, ref: ValueRefe
 
 type ValueOf<Kind extends ValueReference['kind']> = Extract<ValueReference, { kind: Kind }>;
 
-/** Values that are looked up or computed at a place: all but those that only finished findings have. */
-export function measuredOrPredicted(
-  values: Values,
-  ref: ValueOf<'quantity' | 'mean' | 'prediction' | 'reading'>,
-): Scalar | Fault {
+type PlacedReference = ValueOf<'quantity' | 'mean' | 'prediction' | 'reading'>;
+
+const placed = new WeakMap<Values, WeakMap<PlacedReference, Scalar | Fault>>();
+
+/** Values that are looked up or computed at a place; each reference once. */
+function measuredOrPredicted(values: Values, ref: PlacedReference): Scalar | Fault {
+  let known = placed.get(values);
+  if (known === undefined) placed.set(values, (known = new WeakMap()));
+  let value = known.get(ref);
+  if (value === undefined) known.set(ref, (value = valueAtPlace(values, ref)));
+  return value;
+}
+
+function valueAtPlace(values: Values, ref: PlacedReference): Scalar | Fault {
   switch (ref.kind) {
     case 'quantity':
       return registerScalar(values, ref);

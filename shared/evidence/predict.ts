@@ -76,7 +76,7 @@ export function brokenLimits(values: Values, scope: Scope, model: string): reado
     if (quantity === undefined || isFault(value)) continue;
     const end = (reading: Reading | null, open: number): number => {
       if (reading === null) return open;
-      const read = checkedReading(register, reading, quantity, { words: 'A limit', at: model });
+      const read = checkedReading(register, reading, quantity, { words: () => 'A limit', at: model });
       return 'shape' in read ? open : read.value;
     };
     const here = rowOf(value.values, 0);

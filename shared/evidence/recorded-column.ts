@@ -84,7 +84,7 @@ function readCell(
   const reading = trial.values[quantity.id];
   if (reading === undefined)
     return { value: fallback === null ? NaN : rowOf(fallback.values, 0), own: 0, apart: 0 };
-  const words = `${symbolName(register, quantity.id)} of ${trialName(register, trial.id)}`;
+  const words = (): string => `${symbolName(register, quantity.id)} of ${trialName(register, trial.id)}`;
   const read = checkedReading(register, reading, quantity, { words, at: trial.id });
   if ('shape' in read) return read;
   if (read.u !== null) return { value: read.value, own: read.u, apart: 0 };

@@ -29,7 +29,9 @@ export function registerOf(evidence: Evidence): Register {
     quantities: byId(evidence.quantities),
     instruments: byId(evidence.instruments),
     series: byId(evidence.series),
-    trials: byId(evidence.trials),
+    get trials() {
+      return byId(evidence.trials);
+    },
     models: byId(evidence.models),
     comparisons: byId(evidence.comparisons),
     claims: byId(evidence.claims),

@@ -11,18 +11,30 @@ import type { Values } from './values.ts';
 
 /** Values as a running evaluation has them. */
 export function runValues(run: Evaluation): Values {
+  const findings = new Map<string | null, Map<string, Finding>>();
+  const freedoms = new Map<string, SourceFreedom>();
   const values: Values = {
     register: run.register,
-    finding: (quantity: string, series: string | null): Finding =>
-      registerFinding(run, values, quantity, series),
+    finding: (quantity: string, series: string | null): Finding => {
+      let inSeries = findings.get(series);
+      if (inSeries === undefined) findings.set(series, (inSeries = new Map()));
+      let found = inSeries.get(quantity);
+      if (found === undefined)
+        inSeries.set(quantity, (found = registerFinding(run, values, quantity, series)));
+      return found;
+    },
     groups: (series: string): readonly Group[] =>
       run.node(
         `group list@${series}`,
         () => [seriesGroups(run, series)],
         () => seriesGroups(run, series).map(({ group }) => group),
       ),
-    freedomOf: (source: string): SourceFreedom =>
-      sourceFreedom(run.register, source, freedomInRun(run, values)),
+    freedomOf: (source: string): SourceFreedom => {
+      let freedom = freedoms.get(source);
+      if (freedom === undefined)
+        freedoms.set(source, (freedom = sourceFreedom(run.register, source, freedomInRun(run, values))));
+      return freedom;
+    },
   };
   return values;
 }

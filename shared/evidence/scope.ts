@@ -120,7 +120,7 @@ export function equationValue(
 function runTape({ tape }: CompiledExpression, inputs: readonly Uncertain[], rows: number): Uncertain {
   const length = inputs.every(({ values }) => values.length === 1) ? 1 : rows;
   const columns = inputs.map(({ values }) => (values.length === 1 ? at(values, 0) : values));
-  const values = Float64Array.from(tape.run(columns, length));
+  const values = tape.run(columns, length).slice();
   const uncertain = inputs.some(({ terms }) => terms.length > 0);
   return propagate(values, uncertain ? tape.gradient() : [], inputs);
 }

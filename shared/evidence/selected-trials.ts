@@ -36,7 +36,7 @@ export function siRange(run: Evaluation, range: Range, at: string): SiRange | Fa
   const ends = [range.min, range.max].map((end) =>
     end === null
       ? null
-      : checkedReading(run.register, end, quantity, { words: `The range of ${symbol}`, at }),
+      : checkedReading(run.register, end, quantity, { words: () => `The range of ${symbol}`, at }),
   );
   const [min, max] = ends;
   if (min && 'shape' in min) return min;

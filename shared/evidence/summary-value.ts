@@ -49,7 +49,7 @@ function summarise(run: Evaluation, quantity: Quantity, def: SummaryDefinition):
   const of = symbolName(run.register, def.of);
   const selected = selectTrials(run, def.where, quantity.id);
   if (isFault(selected)) return selected;
-  const kept = selected.filter(({ id }) => run.register.trials.get(id)?.excluded === undefined);
+  const kept = selected.filter(({ series, row }) => keptTrials(run, series)[row] === true);
   const gathered = kept.length === 0 ? null : gather(run, def.of, kept);
   if (gathered !== null && isFault(gathered)) return gathered;
   const whole =

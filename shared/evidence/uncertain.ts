@@ -58,8 +58,11 @@ export function partsOfRow(
 export function rootSumOfSquares(terms: readonly Term[], rows: number): Float64Array | null {
   if (terms.length === 0) return null;
   const sum = new Float64Array(rows);
-  for (const { c } of terms)
-    for (let row = 0; row < rows; row++) sum[row] = at(sum, row) + rowOf(c, row) ** 2;
+  for (const { c } of terms) {
+    if (c.length === rows)
+      for (let row = 0; row < rows; row++) sum[row] = at(sum, row) + at(c, row) * at(c, row);
+    else for (let row = 0; row < rows; row++) sum[row] = at(sum, row) + at(c, 0) * at(c, 0);
+  }
   for (let row = 0; row < rows; row++) sum[row] = Math.sqrt(at(sum, row));
   return sum;
 }

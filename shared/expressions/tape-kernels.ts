@@ -24,7 +24,12 @@ export interface StepFrame {
   readonly isGuarded: boolean;
 }
 
-/** Computes rows 0 … m−1 of `out`. */
+/**
+ * Computes rows 0 … m−1 of `out`.
+ *
+ * Elements are read in place, here and below, and indices are within bounds by construction: in functions as large
+ * as these a reading function is no longer inlined, and every number it returns would be an object to collect.
+ */
 export function runStep(operation: Operation, frame: StepFrame, m: number): void {
   const { out, a, sa, b, sb, c, sc } = frame;
   switch (operation) {
@@ -32,135 +37,143 @@ export function runStep(operation: Operation, frame: StepFrame, m: number): void
     case 'input':
       return;
     case 'negative':
-      for (let k = 0; k < m; k += 1) out[k] = -at(a, k * sa);
+      for (let k = 0; k < m; k += 1) out[k] = -(a[k * sa] as number);
       return;
     case 'add':
-      for (let k = 0; k < m; k += 1) out[k] = at(a, k * sa) + at(b, k * sb);
+      for (let k = 0; k < m; k += 1) out[k] = (a[k * sa] as number) + (b[k * sb] as number);
       return;
     case 'subtract':
-      for (let k = 0; k < m; k += 1) out[k] = at(a, k * sa) - at(b, k * sb);
+      for (let k = 0; k < m; k += 1) out[k] = (a[k * sa] as number) - (b[k * sb] as number);
       return;
     case 'multiply':
-      for (let k = 0; k < m; k += 1) out[k] = at(a, k * sa) * at(b, k * sb);
+      for (let k = 0; k < m; k += 1) out[k] = (a[k * sa] as number) * (b[k * sb] as number);
       return;
     case 'divide':
-      for (let k = 0; k < m; k += 1) out[k] = at(a, k * sa) / at(b, k * sb);
+      for (let k = 0; k < m; k += 1) out[k] = (a[k * sa] as number) / (b[k * sb] as number);
       return;
     case 'power':
-      for (let k = 0; k < m; k += 1) out[k] = at(a, k * sa) ** at(b, k * sb);
+      for (let k = 0; k < m; k += 1) out[k] = (a[k * sa] as number) ** (b[k * sb] as number);
       return;
     case 'square':
-      for (let k = 0; k < m; k += 1) out[k] = at(a, k * sa) * at(a, k * sa);
+      for (let k = 0; k < m; k += 1) out[k] = (a[k * sa] as number) * (a[k * sa] as number);
       return;
     case 'inverse':
-      for (let k = 0; k < m; k += 1) out[k] = 1 / at(a, k * sa);
+      for (let k = 0; k < m; k += 1) out[k] = 1 / (a[k * sa] as number);
       return;
     case 'root':
-      for (let k = 0; k < m; k += 1) out[k] = Math.sqrt(at(a, k * sa));
+      for (let k = 0; k < m; k += 1) out[k] = Math.sqrt(a[k * sa] as number);
       return;
     case 'function': {
       const value = frame.real?.value ?? notANumber;
-      for (let k = 0; k < m; k += 1) out[k] = value(at(a, k * sa));
+      for (let k = 0; k < m; k += 1) out[k] = value(a[k * sa] as number);
       return;
     }
     case 'smaller of':
-      for (let k = 0; k < m; k += 1) out[k] = Math.min(at(a, k * sa), at(b, k * sb));
+      for (let k = 0; k < m; k += 1) out[k] = Math.min(a[k * sa] as number, b[k * sb] as number);
       return;
     case 'larger of':
-      for (let k = 0; k < m; k += 1) out[k] = Math.max(at(a, k * sa), at(b, k * sb));
+      for (let k = 0; k < m; k += 1) out[k] = Math.max(a[k * sa] as number, b[k * sb] as number);
       return;
     case 'angle of':
-      for (let k = 0; k < m; k += 1) out[k] = Math.atan2(at(a, k * sa), at(b, k * sb));
+      for (let k = 0; k < m; k += 1) out[k] = Math.atan2(a[k * sa] as number, b[k * sb] as number);
       return;
     case 'length of':
-      for (let k = 0; k < m; k += 1) out[k] = Math.hypot(at(a, k * sa), at(b, k * sb));
+      for (let k = 0; k < m; k += 1) out[k] = Math.hypot(a[k * sa] as number, b[k * sb] as number);
       return;
     case 'both':
-      for (let k = 0; k < m; k += 1) out[k] = at(a, k * sa) * at(b, k * sb);
+      for (let k = 0; k < m; k += 1) out[k] = (a[k * sa] as number) * (b[k * sb] as number);
       return;
     case 'choose':
       for (let k = 0; k < m; k += 1) {
-        const when = at(a, k * sa);
-        out[k] = Number.isNaN(when) ? NaN : when !== 0 ? at(b, k * sb) : at(c, k * sc);
+        const when = a[k * sa] as number;
+        out[k] = Number.isNaN(when) ? NaN : when !== 0 ? (b[k * sb] as number) : (c[k * sc] as number);
       }
       return;
     default:
-      for (let k = 0; k < m; k += 1) out[k] = compare(operation, at(a, k * sa), at(b, k * sb));
+      for (let k = 0; k < m; k += 1) out[k] = compare(operation, a[k * sa] as number, b[k * sb] as number);
   }
 }
 
-/** Adds the slopes of `out` (in `g`) to those of what went in, row by row: the reverse of runStep. */
+/**
+ * Adds the slopes of `out` (in `g`) to those of what went in, row by row: the reverse of runStep. A row that no
+ * choice took has slope nought, and must not meet an infinite one.
+ */
 export function reverseStep(operation: Operation, frame: StepFrame): void {
   const { n, out, so, a, sa, b, sb, g, ga, gb, gc, isGuarded } = frame;
   switch (operation) {
     case 'negative':
-      if (ga !== null) for (let k = 0; k < n; k += 1) add(ga, k, -at(g, k));
+      if (ga !== null) for (let k = 0; k < n; k += 1) ga[k] = (ga[k] as number) + -(g[k] as number);
       return;
     case 'add':
-      if (ga !== null) for (let k = 0; k < n; k += 1) add(ga, k, at(g, k));
-      if (gb !== null) for (let k = 0; k < n; k += 1) add(gb, k, at(g, k));
+      if (ga !== null) for (let k = 0; k < n; k += 1) ga[k] = (ga[k] as number) + (g[k] as number);
+      if (gb !== null) for (let k = 0; k < n; k += 1) gb[k] = (gb[k] as number) + (g[k] as number);
       return;
     case 'subtract':
-      if (ga !== null) for (let k = 0; k < n; k += 1) add(ga, k, at(g, k));
-      if (gb !== null) for (let k = 0; k < n; k += 1) add(gb, k, -at(g, k));
+      if (ga !== null) for (let k = 0; k < n; k += 1) ga[k] = (ga[k] as number) + (g[k] as number);
+      if (gb !== null) for (let k = 0; k < n; k += 1) gb[k] = (gb[k] as number) + -(g[k] as number);
       return;
     case 'multiply':
       if (ga !== null)
-        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(ga, k, at(g, k) * at(b, k * sb));
+        for (let k = 0; k < n; k += 1)
+          if (!isGuarded || g[k] !== 0) ga[k] = (ga[k] as number) + (g[k] as number) * (b[k * sb] as number);
       if (gb !== null)
-        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(gb, k, at(g, k) * at(a, k * sa));
+        for (let k = 0; k < n; k += 1)
+          if (!isGuarded || g[k] !== 0) gb[k] = (gb[k] as number) + (g[k] as number) * (a[k * sa] as number);
       return;
     case 'divide':
       if (ga !== null)
-        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(ga, k, at(g, k) / at(b, k * sb));
+        for (let k = 0; k < n; k += 1)
+          if (!isGuarded || g[k] !== 0) ga[k] = (ga[k] as number) + (g[k] as number) / (b[k * sb] as number);
       if (gb !== null)
         for (let k = 0; k < n; k += 1)
-          if (counts(g, k, isGuarded)) add(gb, k, (-at(g, k) * at(out, k * so)) / at(b, k * sb));
+          if (!isGuarded || g[k] !== 0)
+            gb[k] = (gb[k] as number) + (-(g[k] as number) * (out[k * so] as number)) / (b[k * sb] as number);
       return;
     case 'square':
       if (ga !== null)
-        for (let k = 0; k < n; k += 1) if (counts(g, k, isGuarded)) add(ga, k, 2 * at(g, k) * at(a, k * sa));
+        for (let k = 0; k < n; k += 1)
+          if (!isGuarded || g[k] !== 0)
+            ga[k] = (ga[k] as number) + 2 * (g[k] as number) * (a[k * sa] as number);
       return;
     case 'root':
       if (ga !== null)
         for (let k = 0; k < n; k += 1)
-          if (counts(g, k, isGuarded)) add(ga, k, (0.5 * at(g, k)) / at(out, k * so));
+          if (!isGuarded || g[k] !== 0)
+            ga[k] = (ga[k] as number) + (0.5 * (g[k] as number)) / (out[k * so] as number);
       return;
     case 'choose': {
       const { a: when, sa: sw } = frame;
       for (let k = 0; k < n; k += 1) {
-        const chosen = at(when, k * sw) !== 0 ? gb : gc;
-        if (chosen !== null) add(chosen, k, at(g, k));
+        const chosen = (when[k * sw] as number) !== 0 ? gb : gc;
+        if (chosen !== null) add(chosen, k, g[k] as number);
       }
       return;
     }
     case 'smaller of':
-      for (let k = 0; k < n; k += 1) choose(at(a, k * sa) <= at(b, k * sb) ? ga : gb, k, at(g, k));
+      for (let k = 0; k < n; k += 1)
+        choose((a[k * sa] as number) <= (b[k * sb] as number) ? ga : gb, k, g[k] as number);
       return;
     case 'larger of':
-      for (let k = 0; k < n; k += 1) choose(at(a, k * sa) >= at(b, k * sb) ? ga : gb, k, at(g, k));
+      for (let k = 0; k < n; k += 1)
+        choose((a[k * sa] as number) >= (b[k * sb] as number) ? ga : gb, k, g[k] as number);
       return;
     case 'function': {
       const slope = frame.real?.slope ?? notANumber;
       if (ga === null) return;
       for (let k = 0; k < n; k += 1) {
-        if (counts(g, k, isGuarded)) add(ga, k, at(g, k) * slope(at(a, k * sa), at(out, k * so)));
+        if (!isGuarded || g[k] !== 0)
+          ga[k] = (ga[k] as number) + (g[k] as number) * slope(a[k * sa] as number, out[k * so] as number);
       }
       return;
     }
     default:
       for (let k = 0; k < n; k += 1) {
-        if (!counts(g, k, isGuarded)) continue;
-        const [x, y, z] = [at(a, k * sa), at(b, k * sb), at(out, k * so)];
-        if (ga !== null) add(ga, k, at(g, k) * slopeOfFirst(operation, x, y, z));
-        if (gb !== null) add(gb, k, at(g, k) * slopeOfSecond(operation, x, y, z));
+        if (isGuarded && g[k] === 0) continue;
+        const [x, y, z] = [a[k * sa] as number, b[k * sb] as number, out[k * so] as number];
+        if (ga !== null) ga[k] = (ga[k] as number) + (g[k] as number) * slopeOfFirst(operation, x, y, z);
+        if (gb !== null) gb[k] = (gb[k] as number) + (g[k] as number) * slopeOfSecond(operation, x, y, z);
       }
   }
-}
-
-/** A row that no choice took has slope nought, and must not meet an infinite one. */
-function counts(g: Float64Array, k: number, isGuarded: boolean): boolean {
-  return !isGuarded || g[k] !== 0;
 }
 
 function slopeOfFirst(operation: Operation, a: number, b: number, out: number): number {
@@ -209,11 +222,6 @@ function compare(operation: Operation, a: number, b: number): number {
     default:
       return NaN;
   }
-}
-
-/** Indices are within bounds by construction; the fallback is never taken. */
-function at(values: Float64Array, index: number): number {
-  return values[index] ?? NaN;
 }
 
 function add(values: Float64Array, index: number, amount: number): void {
