@@ -1,11 +1,9 @@
+import { ReportStation } from '#src/features/report/routes/report-station.tsx';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
-import { PlainPage } from './plain-page.tsx';
+import { useTitle } from '#src/lib/use-title.ts';
 
 export function Component() {
   const { problem } = useProblem();
-  return (
-    <PlainPage title={problem.title}>
-      <p>{problem.statement}</p>
-    </PlainPage>
-  );
+  useTitle('Report', problem.title);
+  return <ReportStation />;
 }
