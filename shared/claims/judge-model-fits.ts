@@ -1,7 +1,7 @@
 import type { Evidence } from '#shared/evidence/evidence.ts';
 import { fault } from '#shared/evidence/fault.ts';
 import type { ClaimFinding, ComparisonFinding, Findings } from '#shared/evidence/findings.ts';
-import { counted, figureInWords, probabilityInWords } from '#shared/evidence/words.ts';
+import { counted, figureInWords, pValueInWords } from '#shared/evidence/words.ts';
 import { FEWEST_TRIALS } from './judge-equals.ts';
 import { tooFewTrials, undecided, withFault } from './undecided.ts';
 
@@ -38,27 +38,29 @@ export function judgeModelFits(
     const { sentence, short } = tooFewTrials(finding.used.length, FEWEST_TRIALS);
     return undecided(found, sentence, short);
   }
-  const { pValue, chiSquared, degreesOfFreedom } = finding;
+  return decide(found, finding);
+}
+
+function decide(found: ClaimFinding, finding: ComparisonFinding): ClaimFinding {
+  const { pValue, chiSquared, degreesOfFreedom, worstZ } = finding;
   if (pValue === null || chiSquared === null || degreesOfFreedom === null)
     return undecided(found, noTest(finding), 'no test possible');
   const trials = counted(finding.used.length, 'trial');
-  const size = finding.worstZ === null ? '' : `, worst ${figureInWords(finding.worstZ)}\u00a0u`;
-  const figures = `χ² is ${figureInWords(chiSquared)} for ${degreesOfFreedom} degree${degreesOfFreedom === 1 ? '' : 's'} of freedom (p = ${probabilityInWords(pValue)}) over ${trials}`;
-  const worstText =
-    finding.worstZ === null ? '' : `; the worst setting misses by ${figureInWords(finding.worstZ)}\u00a0u`;
+  const degrees = `${degreesOfFreedom} degree${degreesOfFreedom === 1 ? '' : 's'} of freedom`;
+  const figures = `χ² is ${figureInWords(chiSquared)} for ${degrees} (${pValueInWords(pValue)}) over ${trials}`;
   if (pValue > HIGHEST_P)
     return undecided(
       found,
       `${figures}: the agreement is better than the uncertainties allow, so that they are too large to test the model. Find smaller ones.`,
       `${trials}, uncertainties too large`,
     );
-  const holds = pValue >= LOWEST_P;
-  const margin = `this claim holds while p lies between ${LOWEST_P} and ${HIGHEST_P}`;
+  const worst = worstZ === null ? null : `${figureInWords(worstZ)}\u00a0u`;
+  const told = worst === null ? '' : `; the worst setting misses by ${worst}`;
   return {
     ...found,
-    verdict: holds ? 'Holds' : 'Leaks',
-    sentence: `${figures}${worstText}; ${margin}.`,
-    short: trials + size,
+    verdict: pValue >= LOWEST_P ? 'Holds' : 'Leaks',
+    sentence: `${figures}${told}; this claim holds while p lies between ${LOWEST_P} and ${HIGHEST_P}.`,
+    short: worst === null ? trials : `${trials}, worst ${worst}`,
   };
 }
 

@@ -1,25 +1,21 @@
-import { agreement, worstMiss } from './comparison-sentence.ts';
-import { foundParameters, solvedComparison } from './comparisons.ts';
+import { chartCurve } from './chart-curve.ts';
 import type { ComparisonData } from './comparison-data.ts';
-import { dependsOn } from './dependencies.ts';
+import { agreement, worstMiss } from './comparison-sentence.ts';
+import {
+  foundParameters,
+  solvedComparison,
+  type SolvedComparison,
+  type UnsolvedComparison,
+} from './comparisons.ts';
 import type { Evaluation } from './evaluation.ts';
 import type { Chart } from './evidence.ts';
 import { fault, isFault } from './fault.ts';
 import type { ChartFinding, ComparisonFinding, Fault, Group } from './findings.ts';
-import { knownAtPlace, placeOfGroup } from './place.ts';
 import { registerValue } from './register-value.ts';
 import { symbolName } from './register.ts';
-import { createScope } from './scope.ts';
-import { inRange } from './selected-trials.ts';
 import { seriesTrials } from './series-trials.ts';
-import { rootSumOfSquares, rowOf, type Uncertain } from './uncertain.ts';
+import { rowOf } from './uncertain.ts';
 import type { Values } from './values.ts';
-
-/** Points of a curve: enough for a line that looks smooth at the width of a page. */
-const CURVE_POINTS = 241;
-
-/** Air beside the outermost points, as a share of their distance. */
-const AIR = 0.04;
 
 /** A comparison as a chart shows it; the same object while nothing it rests on has changed. */
 export function chartFinding(
@@ -45,47 +41,63 @@ export function chartFinding(
       run.evidence.settings,
       ...finding.outside.map(({ trial }) => run.register.trials.get(trial)),
     ],
-    () => {
-      if (!run.register.quantities.has(chart.x))
-        return faulty(
-          chart,
-          fault(
-            'source gone',
-            'The horizontal axis of this chart is a quantity that is gone. Choose another.',
-            chart.id,
-          ),
-        );
-      if (solved.data === null || 'fault' in solved)
-        return faulty(
-          chart,
-          'fault' in solved ? solved.fault : fault('no trials', finding.sentence, comparison.id),
-        );
-      const group = referenceGroup(values, solved.data, finding);
-      const curve =
-        group === null
-          ? null
-          : curveOf(values, chart, {
-              data: solved.data,
-              parameters: foundParameters(solved.fit),
-              group,
-              finding,
-            });
-      if (curve !== null && isFault(curve)) return faulty(chart, curve, solved.data.model.output);
-      return {
-        id: chart.id,
-        x: chart.x,
-        y: solved.data.model.output,
-        curve,
-        points: finding.points,
-        excluded: excludedPoints(run, chart, solved.data, finding),
-        sentence: sentenceOf(run, chart, finding),
-      };
-    },
+    () => drawn({ run, values, chart, finding }, solved),
   );
 }
 
-function faulty({ id, x }: Chart, because: Fault, y = ''): ChartFinding {
-  return { id, fault: because, x, y, curve: null, points: [], excluded: [], sentence: because.sentence };
+interface ChartRequest {
+  readonly run: Evaluation;
+  readonly values: Values;
+  readonly chart: Chart;
+  readonly finding: ComparisonFinding;
+}
+
+/** The chart of a comparison; one that could not be solved still shows what was measured. */
+function drawn(request: ChartRequest, solved: SolvedComparison | UnsolvedComparison): ChartFinding {
+  const { run, values, chart, finding } = request;
+  const { data } = solved;
+  const cause = 'fault' in solved ? solved.fault : axisFault(request);
+  if (data === null) return faulty(chart, cause ?? fault('no trials', finding.sentence, chart.id));
+  const measured = measuredSide(request, data);
+  if (cause !== null) return { ...faulty(chart, cause), ...measured };
+  const group = referenceGroup(values, data, finding);
+  const parameters = foundParameters('fault' in solved ? null : solved.fit);
+  const curve =
+    group === null
+      ? null
+      : chartCurve({ values, x: chart.x, data, parameters, group, points: finding.points });
+  if (curve !== null && 'shape' in curve) return { ...faulty(chart, curve), ...measured };
+  return { id: chart.id, x: chart.x, ...measured, curve, sentence: sentenceOf(run, chart, finding) };
+}
+
+function faulty({ id, x }: Chart, because: Fault): ChartFinding {
+  return { id, fault: because, x, y: '', curve: null, points: [], excluded: [], sentence: because.sentence };
+}
+
+function measuredSide(
+  { run, chart, finding }: ChartRequest,
+  data: ComparisonData,
+): Pick<ChartFinding, 'y' | 'points' | 'excluded'> {
+  return {
+    y: data.model.output,
+    points: finding.points,
+    excluded: excludedPoints(run, chart, data, finding),
+  };
+}
+
+function axisFault({ run, chart, finding }: ChartRequest): Fault | null {
+  if (!run.register.quantities.has(chart.x))
+    return fault(
+      'source gone',
+      'The horizontal axis of this chart is a quantity that is gone. Choose another.',
+      chart.id,
+    );
+  if (finding.points.some((point) => Number.isFinite(point.at[chart.x]))) return null;
+  return fault(
+    'missing input',
+    `${symbolName(run.register, chart.x)} has no value at the compared settings, so that it cannot be the axis. Choose another.`,
+    chart.id,
+  );
 }
 
 /** The group whose other settings the curve is drawn at: the first of the series with the most points. */
@@ -98,70 +110,6 @@ function referenceGroup(values: Values, data: ComparisonData, { points }: Compar
   const [series] = [...counts].sort((a, b) => b[1] - a[1])[0] ?? [data.comparison.selection.series[0] ?? ''];
   const ids = new Set(points.flatMap(({ trials }) => trials));
   return values.groups(series).find(({ kept }) => kept.some((id) => ids.has(id))) ?? null;
-}
-
-interface CurveRequest {
-  readonly data: ComparisonData;
-  readonly parameters: ReadonlyMap<string, Uncertain>;
-  readonly group: Group;
-  readonly finding: ComparisonFinding;
-}
-
-/** The predicted curve: the model over the axis, with the x's own uncertainty as it is at the reference group. */
-function curveOf(
-  values: Values,
-  { x }: Chart,
-  { data, parameters, group, finding }: CurveRequest,
-): ChartFinding['curve'] | Fault {
-  const xs = finding.points.map((point) => point.at[x] ?? NaN).filter(Number.isFinite);
-  if (xs.length === 0)
-    return fault(
-      'missing input',
-      `${symbolName(values.register, x)} has no value at the compared settings, so that it cannot be the axis.`,
-      x,
-    );
-  const axis = axisOf(Math.min(...xs), Math.max(...xs));
-  const known = knownAtPlace(values, placeOfGroup(values, group));
-  const own = known(x);
-  const along: Uncertain = {
-    values: axis,
-    terms: own === null || isFault(own) ? [] : own.terms,
-    known: true,
-    hue: 'measured',
-  };
-  const free = new Set(parameters.keys());
-  const moving = new Set([x]);
-  const scope = createScope(values.register, axis.length, (id) => {
-    if (id === x) return along;
-    const parameter = parameters.get(id);
-    if (parameter !== undefined) return parameter;
-    return dependsOn(values.register, id, free) || dependsOn(values.register, id, moving) ? null : known(id);
-  });
-  const y = scope.find(data.model.output, data.model.id);
-  if (isFault(y)) return y;
-  const trusted = new Uint8Array(axis.length).fill(1);
-  for (const limit of data.limits) {
-    const value = scope.find(limit.quantity, data.model.id);
-    for (let i = 0; i < axis.length; i++)
-      if (isFault(value) || !inRange(rowOf(value.values, i), limit)) trusted[i] = 0;
-  }
-  const n = axis.length;
-  return {
-    x: axis,
-    y: Float64Array.from(axis, (_, i) => rowOf(y.values, i)),
-    u: rootSumOfSquares(y.terms, n) ?? new Float64Array(n),
-    trusted,
-  };
-}
-
-function axisOf(low: number, high: number): Float64Array {
-  const air = high > low ? AIR * (high - low) : 0.1 * Math.abs(low) || 1;
-  const [from, to] = [low - air, high + air];
-  const start = low >= 0 && from < 0 ? 0 : from;
-  return Float64Array.from(
-    { length: CURVE_POINTS },
-    (_, i) => start + ((to - start) * i) / (CURVE_POINTS - 1),
-  );
 }
 
 function excludedPoints(

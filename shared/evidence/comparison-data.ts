@@ -4,7 +4,7 @@ import type { Evaluation } from './evaluation.ts';
 import type { Comparison, Model } from './evidence.ts';
 import { fault, isFault } from './fault.ts';
 import type { ComparisonFinding, Fault } from './findings.ts';
-import { symbolName } from './register.ts';
+import { symbolName, type Register } from './register.ts';
 import { createScope, notDefined } from './scope.ts';
 import { gather, inRange, selectTrials, siRange, type Pick, type SiRange } from './selected-trials.ts';
 import { keptTrials } from './series-trials.ts';
@@ -18,6 +18,8 @@ export interface FreeParameter {
   readonly max: number | undefined;
 }
 
+type Outside = ComparisonFinding['outside'];
+
 /** What a comparison sets against its model: trials, sorted by why they count or not, and their columns. */
 export interface ComparisonData {
   readonly comparison: Comparison;
@@ -27,7 +29,7 @@ export interface ComparisonData {
   /** Trials that count, and those that are kept and complete but outside trust. */
   readonly used: readonly Pick[];
   readonly untrusted: readonly Pick[];
-  readonly outside: ComparisonFinding['outside'];
+  readonly outside: Outside;
   /** Measured side and what the model takes, over the used trials. */
   readonly measured: Uncertain;
   readonly leaves: ReadonlyMap<string, Uncertain>;
@@ -36,7 +38,7 @@ export interface ComparisonData {
 /** A comparison whose trials cannot be had, with what is known of them. */
 export interface FaultyComparison {
   readonly fault: Fault;
-  readonly outside: ComparisonFinding['outside'];
+  readonly outside: Outside;
 }
 
 /** Gathers a comparison's trials and columns. */
@@ -52,48 +54,45 @@ export function comparisonData(
     );
   const selected = selectTrials(run, comparison.selection, comparison.id);
   if (isFault(selected)) return faulty(selected);
+  const limits = limitsOf(run, model);
+  if (isFault(limits)) return faulty(limits);
+  const definition = { model, free, limits };
+  const isKept = ({ series, row }: Pick): boolean => keptTrials(run, series)[row] === true;
+  const kept = selected.filter(isKept);
+  const excluded = because(
+    selected.filter((pick) => !isKept(pick)),
+    'excluded',
+  );
+  if (kept.length === 0) return faulty(noTrials(comparison, selected.length), excluded);
+  const whole = sideColumns(run, definition, kept);
+  if (isFault(whole)) return faulty(whole, excluded);
+  const incomplete = kept.filter((_, row) => !whole.complete(row));
+  const used = kept.filter((_, row) => whole.complete(row) && whole.trusted(row));
+  const untrusted = kept.filter((_, row) => whole.complete(row) && !whole.trusted(row));
+  const outside = [...excluded, ...because(incomplete, 'incomplete'), ...because(untrusted, 'outside trust')];
+  if (used.length === 0) return faulty(noneUsed(comparison, model, kept.length), outside);
+  const part = used.length === kept.length ? whole : sideColumns(run, definition, used);
+  if (isFault(part)) return faulty(part, outside);
+  const { measured, leaves } = part;
+  return { comparison, model, free, limits, used, untrusted, outside, measured, leaves };
+}
+
+function because(picks: readonly Pick[], why: Outside[number]['why']): Outside {
+  return picks.map(({ id }) => ({ trial: id, why }));
+}
+
+function limitsOf(run: Evaluation, model: Model): readonly SiRange[] | Fault {
   const limits: SiRange[] = [];
   for (const limit of model.limits) {
     const range = siRange(run, limit, model.id);
-    if (isFault(range)) return faulty(range);
+    if (isFault(range)) return range;
     limits.push(range);
   }
-  const isKept = ({ series, row }: Pick): boolean => keptTrials(run, series)[row] === true;
-  const kept = selected.filter(isKept);
-  const outside: { trial: string; why: 'excluded' | 'outside trust' | 'incomplete' }[] = selected
-    .filter((pick) => !isKept(pick))
-    .map(({ id }) => ({ trial: id, why: 'excluded' }));
-  if (kept.length === 0) return faulty(noTrials(comparison, selected.length), outside);
-  const whole = sideColumns(run, { comparison, model, free, limits }, kept);
-  if (isFault(whole)) return faulty(whole, outside);
-  const [used, untrusted]: [Pick[], Pick[]] = [[], []];
-  kept.forEach((pick, row) => {
-    if (!whole.complete(row)) outside.push({ trial: pick.id, why: 'incomplete' });
-    else if (whole.trusted(row)) used.push(pick);
-    else {
-      untrusted.push(pick);
-      outside.push({ trial: pick.id, why: 'outside trust' });
-    }
-  });
-  if (used.length === 0) return faulty(noneUsed(run, comparison, model, kept.length), outside);
-  const part =
-    used.length === kept.length ? whole : sideColumns(run, { comparison, model, free, limits }, used);
-  if (isFault(part)) return faulty(part, outside);
-  return {
-    comparison,
-    model,
-    free,
-    limits,
-    used,
-    untrusted,
-    outside,
-    measured: part.measured,
-    leaves: part.leaves,
-  };
+  return limits;
 }
 
-function faulty(because: Fault, outside: ComparisonFinding['outside'] = []): FaultyComparison {
-  return { fault: because, outside };
+function faulty(cause: Fault, outside: Outside = []): FaultyComparison {
+  return { fault: cause, outside };
 }
 
 function noTrials(comparison: Comparison, selected: number): Fault {
@@ -104,7 +103,7 @@ function noTrials(comparison: Comparison, selected: number): Fault {
   return fault('no trials', `“${comparison.name}” has nothing to compare. ${sentence}`, comparison.id);
 }
 
-function noneUsed(run: Evaluation, comparison: Comparison, model: Model, kept: number): Fault {
+function noneUsed(comparison: Comparison, model: Model, kept: number): Fault {
   return fault(
     'no trials',
     `“${comparison.name}” has nothing to compare: ${kept === 1 ? 'its trial is' : `all of its ${kept} trials are`} incomplete or outside the range in which model ${model.n} is trusted.`,
@@ -113,7 +112,6 @@ function noneUsed(run: Evaluation, comparison: Comparison, model: Model, kept: n
 }
 
 interface Definition {
-  readonly comparison: Comparison;
   readonly model: Model;
   readonly free: readonly FreeParameter[];
   readonly limits: readonly SiRange[];
@@ -128,17 +126,10 @@ interface SideColumns {
 
 /** Both sides' columns over some picks; the model is run once at the start values to see what it takes. */
 function sideColumns(run: Evaluation, definition: Definition, picks: readonly Pick[]): SideColumns | Fault {
-  const { model, free, limits, comparison } = definition;
+  const { model, free, limits } = definition;
   const { register } = run;
-  const origin = register.quantities.get(model.output)?.def.origin;
-  if (origin === 'predicted' || origin === 'fitted')
-    return fault(
-      'missing input',
-      `${symbolName(register, model.output)} is not measured, so that nothing can be set against it. Let the model's output be a quantity that trials read.`,
-      model.id,
-    );
-  if (!model.equations.some(({ defines }) => defines === model.output))
-    return notDefined(register, model.output, model.id);
+  const unfit = outputFault(register, model);
+  if (unfit !== null) return unfit;
   const measured = gather(run, model.output, picks);
   if (isFault(measured)) return measured;
   const parameters = new Set(free.map(({ quantity }) => quantity));
@@ -157,13 +148,6 @@ function sideColumns(run: Evaluation, definition: Definition, picks: readonly Pi
   const ranges = limits.map((limit) => ({ limit, value: scope.find(limit.quantity, model.id) }));
   const broken = ranges.find(({ value }) => isFault(value));
   if (broken !== undefined && isFault(broken.value)) return broken.value;
-  const unknown = free.find(({ quantity }) => !register.quantities.has(quantity));
-  if (unknown !== undefined)
-    return fault(
-      'source gone',
-      `A free parameter of “${comparison.name}” is gone. Choose another.`,
-      comparison.id,
-    );
   const columns = [measured, ...leaves.values()];
   return {
     measured,
@@ -172,6 +156,19 @@ function sideColumns(run: Evaluation, definition: Definition, picks: readonly Pi
     trusted: (row) =>
       ranges.every(({ limit, value }) => isFault(value) || inRange(rowOf(value.values, row), limit)),
   };
+}
+
+/** Why a model's output cannot be set against trials; null when it can. */
+function outputFault(register: Register, model: Model): Fault | null {
+  const origin = register.quantities.get(model.output)?.def.origin;
+  if (origin === 'predicted' || origin === 'fitted')
+    return fault(
+      'missing input',
+      `${symbolName(register, model.output)} is not measured, so that nothing can be set against it. Let the model’s output be a quantity that trials read.`,
+      model.id,
+    );
+  const isDefined = model.equations.some(({ defines }) => defines === model.output);
+  return isDefined ? null : notDefined(register, model.output, model.id);
 }
 
 /** Whether every value of a column is the same. */

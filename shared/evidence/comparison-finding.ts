@@ -1,4 +1,5 @@
 import { standardUncertainty } from '#shared/uncertainty/standard-uncertainty.ts';
+import type { ComparisonData } from './comparison-data.ts';
 import { comparisonPoints } from './comparison-points.ts';
 import { comparisonSentence } from './comparison-sentence.ts';
 import { comparisonWarnings } from './comparison-warnings.ts';
@@ -14,7 +15,7 @@ import {
 import { comparisonInputs } from './dependencies.ts';
 import type { Evaluation } from './evaluation.ts';
 import type { Comparison } from './evidence.ts';
-import type { ComparisonFinding, FittedParameter } from './findings.ts';
+import type { ComparisonFinding, ComparisonPoint, FittedParameter } from './findings.ts';
 import { seriesGroups } from './groups.ts';
 import type { Values } from './values.ts';
 
@@ -40,7 +41,7 @@ export function comparisonFinding(
     },
     () =>
       'fault' in solved
-        ? unsolvedFinding(comparison, solved)
+        ? unsolvedFinding(values, comparison, solved)
         : solvedFinding(run, values, comparison, solved),
   );
 }
@@ -59,7 +60,9 @@ function fitsUsed(
   return [...fits];
 }
 
+/** What is known of a comparison that could not be solved: its trials, and what they measured. */
 function unsolvedFinding(
+  values: Values,
   { id }: Comparison,
   { fault, outside, data }: UnsolvedComparison,
 ): ComparisonFinding {
@@ -76,10 +79,15 @@ function unsolvedFinding(
     worstZ: null,
     used: data?.used.map((pick) => pick.id) ?? [],
     outside,
-    points: [],
+    points: data === null ? [] : measuredOnly(values, data),
     warnings: [],
     sentence: fault.sentence,
   };
+}
+
+function measuredOnly(values: Values, data: ComparisonData): readonly ComparisonPoint[] {
+  const points = comparisonPoints({ values, data, parameters: new Map(), fits: new Map() });
+  return points.map((point) => ({ ...point, predicted: null, difference: null, z: null, fittedTo: false }));
 }
 
 function solvedFinding(

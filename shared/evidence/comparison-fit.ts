@@ -16,7 +16,7 @@ import {
 } from './comparison-model.ts';
 import { fault } from './fault.ts';
 import type { Fault, Part } from './findings.ts';
-import { fitSensitivities } from './fit-sensitivities.ts';
+import { fitSensitivities, type FitSolution } from './fit-sensitivities.ts';
 import { symbolName, trialName, type Register } from './register.ts';
 import { rowOf, type Term } from './uncertain.ts';
 import { counted, listInWords } from './words.ts';
@@ -67,32 +67,31 @@ export function solveComparison(register: Register, data: ComparisonData): Solve
       data,
       data.free.map((_, i) => i),
     );
-  const sensitivities = fitSensitivities({
-    data,
-    model,
-    outcome,
-    covariance: outcome.covariance,
-    outputSigmas: weights,
-  });
-  const n = data.used.length;
+  const { chiSquared, degreesOfFreedom } = outcome;
   return {
-    parameters: data.free.map(({ quantity }, i) => ({
-      quantity,
-      value: at(outcome.parameters, i),
-      fitParts: item(statistical, i),
-      sharedParts: sensitivities
-        .map(({ source, byParameter }) => ({ source, c: at(byParameter, i) }))
-        .filter(({ c }) => c !== 0),
-      atBound: outcome.atBound[i] === true,
-    })),
+    parameters: foundIn({ data, model, outcome, outputSigmas: weights }, statistical),
     covariance: [...covariance],
     condition: outcome.condition,
-    chiSquared: outcome.chiSquared,
-    degreesOfFreedom: outcome.degreesOfFreedom,
-    pValue: relative ? null : goodnessOfFit(outcome.chiSquared, outcome.degreesOfFreedom).pValue,
-    aicc: relative ? null : aicc(outcome.chiSquared, data.free.length, n),
+    chiSquared,
+    degreesOfFreedom,
+    pValue: relative ? null : goodnessOfFit(chiSquared, degreesOfFreedom).pValue,
+    aicc: relative ? null : aicc(chiSquared, data.free.length, data.used.length),
     residuals: standardised(model, outcome, sigmas),
   };
+}
+
+function foundIn(solution: FitSolution, statistical: readonly Part[][]): readonly FoundParameter[] {
+  const { data, outcome } = solution;
+  const sensitivities = fitSensitivities(solution);
+  return data.free.map(({ quantity }, i) => ({
+    quantity,
+    value: at(outcome.parameters, i),
+    fitParts: item(statistical, i),
+    sharedParts: sensitivities
+      .map(({ source, byParameter }) => ({ source, c: at(byParameter, i) }))
+      .filter(({ c }) => c !== 0),
+    atBound: outcome.atBound[i] === true,
+  }));
 }
 
 function standardised(model: ComparisonModel, outcome: ConvergedFit, sigmas: Float64Array): Float64Array {

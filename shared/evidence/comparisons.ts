@@ -81,47 +81,43 @@ function solve(run: Evaluation, comparison: Comparison): SolvedComparison | Unso
 function freeParameters(run: Evaluation, comparison: Comparison): readonly FreeParameter[] | Fault {
   const free: FreeParameter[] = [];
   for (const parameter of comparison.free) {
-    const quantity = run.register.quantities.get(parameter.quantity);
-    if (quantity === undefined)
-      return fault(
-        'source gone',
-        `A free parameter of “${comparison.name}” is gone. Choose another.`,
-        comparison.id,
-      );
-    const words = (what: string) =>
-      `The ${what} of ${symbolName(run.register, quantity.id)} in “${comparison.name}”`;
-    const read = (reading: Reading | null, what: string): number | undefined | Fault => {
-      if (reading === null) return undefined;
-      const checked = checkedReading(run.register, reading, quantity, {
-        words: () => words(what),
-        at: comparison.id,
-      });
-      return 'shape' in checked ? checked : checked.value;
-    };
-    const [start, min, max] = [
-      read(parameter.start, 'start'),
-      read(parameter.min, 'lower bound'),
-      read(parameter.max, 'upper bound'),
-    ];
-    if (typeof start === 'object') return start;
-    if (typeof min === 'object') return min;
-    if (typeof max === 'object') return max;
-    if (min !== undefined && max !== undefined && min >= max)
-      return fault(
-        'not a number',
-        `${words('lower bound')} is not below the upper one. Exchange them, or leave one out.`,
-        comparison.id,
-      );
-    const inside = Math.min(Math.max(start ?? 0, min ?? -Infinity), max ?? Infinity);
-    if (inside !== start)
-      return fault(
-        'not a number',
-        `${words('start')} lies outside of its bounds. Start inside.`,
-        comparison.id,
-      );
-    free.push({ quantity: parameter.quantity, start, min, max });
+    const read = freeParameter(run, comparison, parameter);
+    if (isFault(read)) return read;
+    free.push(read);
   }
   return free;
+}
+
+function freeParameter(
+  run: Evaluation,
+  { id, name }: Comparison,
+  parameter: Comparison['free'][number],
+): FreeParameter | Fault {
+  const quantity = run.register.quantities.get(parameter.quantity);
+  if (quantity === undefined)
+    return fault('source gone', `A free parameter of “${name}” is gone. Choose another.`, id);
+  const words = (what: string): string =>
+    `The ${what} of ${symbolName(run.register, quantity.id)} in “${name}”`;
+  const read = (reading: Reading | null, what: string): number | undefined | Fault => {
+    if (reading === null) return undefined;
+    const checked = checkedReading(run.register, reading, quantity, { words: () => words(what), at: id });
+    return 'shape' in checked ? checked : checked.value;
+  };
+  const start = read(parameter.start, 'start');
+  const min = read(parameter.min, 'lower bound');
+  const max = read(parameter.max, 'upper bound');
+  for (const end of [start, min, max]) if (typeof end === 'object') return end;
+  if (typeof start !== 'number' || typeof min === 'object' || typeof max === 'object')
+    return fault('missing input', `${words('start')} is missing. Enter one.`, id);
+  if (min !== undefined && max !== undefined && min >= max)
+    return fault(
+      'not a number',
+      `${words('lower bound')} is not below the upper one. Exchange them, or leave one out.`,
+      id,
+    );
+  if (start < (min ?? -Infinity) || start > (max ?? Infinity))
+    return fault('not a number', `${words('start')} lies outside of its bounds. Start inside.`, id);
+  return { quantity: parameter.quantity, start, min, max };
 }
 
 /** Values of the free parameters with all their parts, by quantity. */

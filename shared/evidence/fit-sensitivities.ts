@@ -17,8 +17,6 @@ export interface FitSolution {
   readonly data: ComparisonData;
   readonly model: ComparisonModel;
   readonly outcome: ConvergedFit;
-  /** Unscaled, so that its roots are the parameters' natural steps. */
-  readonly covariance: Float64Array;
   readonly outputSigmas: Float64Array;
 }
 
@@ -42,12 +40,12 @@ const STEP = 1e-3;
  */
 export function fitSensitivities(solution: FitSolution): readonly SourceSensitivity[] {
   const sources = sharedSources(solution.data);
-  const { parameters, atBound } = solution.outcome;
+  const { parameters, atBound, covariance } = solution.outcome;
   const k = parameters.length;
   const moving = [...parameters.keys()].filter((i) => atBound[i] !== true);
   if (sources.length === 0) return [];
   const byParameter = moving.map((j) => {
-    const step = STEP * Math.sqrt(at(solution.covariance, j * k + j));
+    const step = STEP * Math.sqrt(at(covariance, j * k + j));
     const moved = (by: number): Float64Array => parameters.map((value, i) => (i === j ? value + by : value));
     return difference(stationarity(solution, moved(step)), stationarity(solution, moved(-step)), step);
   });

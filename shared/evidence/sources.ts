@@ -19,14 +19,10 @@ export function describeSource(register: Register, id: string, evaluated: Evalua
       return instrumentSource(register, id, owner, name);
     case 'const':
       return constantSource(register, id, owner, name);
-    case 'held':
-      return source(
-        id,
-        `${symbolName(register, name)} as held in ${seriesName(register, owner)}`,
-        'constant',
-        Infinity,
-        true,
-      );
+    case 'held': {
+      const words = `${symbolName(register, name)} as held in ${seriesName(register, owner)}`;
+      return source(id, words, 'constant', Infinity, true);
+    }
     case 'fit': {
       const words = `fit of “${register.comparisons.get(owner)?.name ?? 'a comparison that is gone'}”`;
       return source(id, words, 'fit', evaluated.ofFit(owner), true);
@@ -36,22 +32,14 @@ export function describeSource(register: Register, id: string, evaluated: Evalua
       const words = `scatter of ${symbolName(register, key.split('@')[0] ?? '')}`;
       return source(id, words, 'scatter', evaluated.ofMean(key), false);
     }
-    case 'trial':
-      return source(
-        id,
-        `reading of ${symbolName(register, name)} in ${trialName(register, owner)}`,
-        'reading',
-        Infinity,
-        false,
-      );
-    default:
-      return source(
-        id,
-        `setting of ${symbolName(register, owner.split('@')[0] ?? '')}`,
-        'reading',
-        Infinity,
-        false,
-      );
+    case 'trial': {
+      const words = `reading of ${symbolName(register, name)} in ${trialName(register, owner)}`;
+      return source(id, words, 'reading', Infinity, false);
+    }
+    default: {
+      const words = `setting of ${symbolName(register, owner.split('@')[0] ?? '')}`;
+      return source(id, words, 'reading', Infinity, false);
+    }
   }
 }
 

@@ -69,12 +69,12 @@ export function figureInWords(value: number): string {
 }
 
 /**
- * A probability to two digits, or the bound below which it lies.
+ * A p-value to two digits, or the bound below which it lies.
  *
- * @example probabilityInWords(0.0234) // => '0.023'
- * @example probabilityInWords(1e-9) // => 'less than 0.0001'
+ * @example pValueInWords(0.0234) // => 'p = 0.023'
+ * @example pValueInWords(1e-9) // => 'p < 0.0001'
  */
-export function probabilityInWords(p: number): string {
-  if (p < 1e-4) return 'less than 0.0001';
-  return p > 0.995 ? p.toFixed(4) : String(Number(p.toPrecision(2)));
+export function pValueInWords(p: number): string {
+  if (p < 1e-4) return 'p < 0.0001';
+  return `p = ${p > 0.995 ? p.toFixed(4) : String(Number(p.toPrecision(2)))}`;
 }

@@ -396,6 +396,34 @@ describe('faults of comparisons', () => {
     ).toBe(true);
   });
 
+  test('a fit that fails: what was measured is still shown, in the comparison and in its chart', () => {
+    const of = spring();
+    const bare = {
+      ...of,
+      quantities: of.quantities.map((row) => (row.id === 'L' ? recorded('L', 'mm') : row)),
+    };
+
+    const findings = evaluate(bare);
+
+    expect(findings.comparisons.get('c1')?.points).toHaveLength(5);
+    expect(findings.charts.get('ch1')).toMatchObject({
+      fault: { code: 'uncertainty not positive' },
+      y: 'L',
+      curve: null,
+    });
+    expect(
+      findings.charts.get('ch1')?.points.every(({ predicted, z }) => predicted === null && z === null),
+    ).toBe(true);
+  });
+
+  test('an axis that has no value at the compared settings: says so', () => {
+    const of = { ...spring(), quantities: [...spring().quantities, recorded('T', 'K')] };
+
+    expect(
+      evaluate({ ...of, charts: of.charts.map((row) => ({ ...row, x: 'T' })) }).charts.get('ch1')?.sentence,
+    ).toBe('T has no value at the compared settings, so that it cannot be the axis. Choose another.');
+  });
+
   test('a model that was removed: source gone, and what hangs on it says so too', () => {
     const findings = evaluate({ ...spring(), models: [] });
 
