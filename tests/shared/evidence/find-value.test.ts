@@ -4,6 +4,7 @@ import { describe, expect, test } from 'vitest';
 import { leaningSpoutEvidence } from '#server/database/seeders/demo/leaning-spout-evidence.ts';
 import { evaluate } from '#shared/evidence/evaluate.ts';
 import type { Evidence, ValueReference } from '#shared/evidence/evidence.ts';
+import { findSource } from '#shared/evidence/find-source.ts';
 import { findValue } from '#shared/evidence/find-value.ts';
 import type { Scalar } from '#shared/evidence/findings.ts';
 import { keyOf } from '#shared/evidence/keys.ts';
@@ -405,5 +406,36 @@ describe('keys and readings', () => {
     expect(keyOf({ kind: 'difference', a: mean, b: prediction })).not.toBe(
       keyOf({ kind: 'difference', a: prediction, b: mean }),
     );
+  });
+});
+
+describe('sources in words', () => {
+  test.each([
+    ['inst:i-tray:offset', 'ruled tray, zero common to all', true],
+    ['const:q-y:own', 'y as it was read', true],
+    ['held:series-b:q-h:own', 'h as held in series B', true],
+    ['fit:c-upright:0', 'fit of “Upright can”', true],
+    ['trial:trial-b12:q-r', 'reading of R in B12', false],
+  ] as const)('%s: %s', (id, words, shared) => {
+    expect(findSource(findings, spout, id)).toMatchObject({ id, words, shared });
+  });
+
+  test('the scatter of a mean: has the degrees of freedom of its trials', () => {
+    const source = scalar(spout, mean).parts.find((part) => part.source.startsWith('mean:'))?.source ?? '';
+
+    expect(findSource(findings, spout, source)).toMatchObject({
+      words: 'scatter of R',
+      kind: 'scatter',
+      degreesOfFreedom: 2,
+    });
+  });
+
+  test('every part of a prediction at a setting: can be told', () => {
+    const words = scalar(spout, prediction).parts.map(
+      ({ source }) => findSource(findings, spout, source).words,
+    );
+
+    expect(words).toContain('setting of θ');
+    expect(words.every((text) => !text.includes('gone'))).toBe(true);
   });
 });
