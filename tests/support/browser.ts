@@ -33,7 +33,7 @@ export async function signIn(page: Page, url: string, email: string): Promise<vo
   await page.getByLabel('University email').fill(email);
   await page.getByLabel('Passphrase', { exact: true }).fill(passphrase);
   await page.getByRole('button', { name: 'Sign in', exact: true }).click();
-  await page.getByRole('heading', { level: 1 }).waitFor();
+  await page.waitForURL(/\/team\//);
 }
 
 /** A person at a window of their own, already signed in. */

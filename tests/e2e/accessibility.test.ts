@@ -1,0 +1,70 @@
+/** Every screen, in light and dark, wide and narrow: axe finds nothing, and no page scrolls sideways. */
+import AxeBuilder from '@axe-core/playwright';
+import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import type { Browser, Page } from 'playwright-core';
+import { DEMO_PEOPLE, openBrowser, person } from '#tests/support/browser.ts';
+import { startApp, type RunningApp } from '#tests/support/running-app.ts';
+
+const P = '/team/tern-rock/problem/1';
+const SCREENS = [
+  ['Season', '/team/tern-rock'],
+  ['Trials', `${P}/trials`],
+  ['Model', `${P}/model`],
+  ['Claim sheet', `${P}/model/claims`],
+  ['Report', `${P}/report`],
+  ['Report, first day', '/team/tern-rock/problem/12/report'],
+  ['Trials, none yet', '/team/tern-rock/problem/12/trials'],
+  ['Model, none yet', '/team/tern-rock/problem/12/model'],
+  ['Settings', `${P}/settings`],
+  ['New problem', '/team/tern-rock/new-problem'],
+  ['Account', '/account'],
+  ['An address that leads nowhere', '/team/tern-rock/problem/77/report'],
+] as const;
+
+let app: RunningApp;
+let browser: Browser;
+let wide: Page;
+let narrow: Page;
+beforeAll(async () => {
+  [app, browser] = await Promise.all([startApp(), openBrowser()]);
+  ({ page: wide } = await person(browser, app.url, DEMO_PEOPLE.captain));
+  ({ page: narrow } = await person(browser, app.url, DEMO_PEOPLE.captain, {
+    viewport: { width: 390, height: 844 },
+  }));
+});
+afterAll(async () => {
+  await browser.close();
+  await app.stop();
+});
+
+async function findings(page: Page, path: string, theme: 'light' | 'dark'): Promise<string[]> {
+  await page.emulateMedia({ reducedMotion: 'reduce', colorScheme: theme });
+  await page.goto(app.url + path);
+  await page.locator('main').waitFor();
+  await page.waitForLoadState('networkidle');
+  await expect.poll(() => page.evaluate(() => document.documentElement.dataset.theme ?? 'light')).toBe(theme);
+  const { violations } = await new AxeBuilder({ page })
+    .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])
+    .analyze();
+  const sideways = await page.evaluate(() => document.documentElement.scrollWidth > window.innerWidth + 1);
+  return [
+    ...violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html.slice(0, 160)).join(' | ')}`),
+    ...(sideways ? ['the page scrolls sideways'] : []),
+  ];
+}
+
+describe.each(['light', 'dark'] as const)('in %s', (theme) => {
+  test.each(SCREENS)('%s, 1440 px wide', async (_name, path) => {
+    expect(await findings(wide, path, theme)).toEqual([]);
+  });
+
+  test.each(SCREENS)('%s, 390 px wide', async (_name, path) => {
+    expect(await findings(narrow, path, theme)).toEqual([]);
+  });
+
+  test('Sign in', async () => {
+    const page = await browser.newPage();
+    expect(await findings(page, '/', theme)).toEqual([]);
+    await page.close();
+  });
+});
