@@ -1,4 +1,5 @@
 import type { Evidence } from '#shared/evidence/evidence.ts';
+import { findSource } from '#shared/evidence/find-source.ts';
 import type { Findings, Scalar } from '#shared/evidence/findings.ts';
 import { counted } from '#shared/evidence/words.ts';
 import { groupDigits } from '#shared/formatting/digit-groups.ts';
@@ -26,7 +27,7 @@ export function uncertaintyTerm(
   if (scalar.u === null) return [];
   const write = (u: number) => uncertaintyFigures({ value: scalar.value, u: scalar.u }, u, unit, evidence);
   const total = scalar.u ** 2;
-  const sources = bySource(scalar, findings);
+  const sources = bySource(scalar, evidence, findings);
   const listed = sources.filter(({ c }) => c ** 2 >= SMALL_SHARE * total).slice(0, MOST_PARTS);
   const rest = sources.slice(listed.length);
   const own = listed.length === 1 && rest.length === 0;
@@ -43,10 +44,14 @@ export function uncertaintyTerm(
 }
 
 /** Contributions with equal words are told as one (the columns of one fit, say). */
-function bySource(scalar: Scalar, findings: Findings): readonly { words: string; c: number }[] {
+function bySource(
+  scalar: Scalar,
+  evidence: Evidence,
+  findings: Findings,
+): readonly { words: string; c: number }[] {
   const squares = new Map<string, number>();
   for (const { source, c } of scalar.parts) {
-    const words = findings.sources.get(source)?.words ?? 'a source that is gone';
+    const { words } = findSource(findings, evidence, source);
     squares.set(words, (squares.get(words) ?? 0) + c * c);
   }
   return [...squares]

@@ -8,7 +8,7 @@ import type { StationWord } from './station.ts';
 import { StationsSheet } from './stations-sheet.tsx';
 import { ThemeWord } from './theme-word.tsx';
 
-const WORDS = 'min-h-[18px] text-left text-xs font-medium text-ink-2 hover:text-ink';
+const WORDS = 'min-h-6 text-left text-xs font-medium text-ink-2 hover:text-ink';
 
 interface TopLineProps {
   /** Where the name leads. */

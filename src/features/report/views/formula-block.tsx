@@ -73,12 +73,12 @@ function Equation({ attrs }: { readonly attrs: FormulaAttributes }) {
     );
   }
   return (
-    <>
+    <div className="report-formula-frame" role="group" aria-label={worked.spoken} tabIndex={0}>
       <Katex latex={worked.symbols} display />
       {worked.numbers && (
         <Katex className="report-formula-worked" latex={worked.numbers} display label={worked.spoken} />
       )}
-    </>
+    </div>
   );
 }
 

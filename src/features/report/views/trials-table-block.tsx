@@ -15,7 +15,13 @@ export function TrialsTableBlock({ node, editor, updateAttributes, selected }: N
   const view = trialsTable(series, evidence, findings);
   return (
     <NodeViewWrapper as="figure" className="report-figure" id={anchor} data-selected={selected || undefined}>
-      <div contentEditable={false} className="overflow-x-auto">
+      <div
+        contentEditable={false}
+        className="relative overflow-x-auto"
+        role="region"
+        aria-label={`Table ${number ?? ''}`.trim()}
+        tabIndex={0}
+      >
         {view ? (
           <Table view={view} />
         ) : (
