@@ -1,50 +1,54 @@
-/** What a browser must load before it can work, in script, compressed as the server sends it. */
-import { readFileSync } from 'node:fs';
-import { join } from 'node:path';
+/** How much script a browser loads before one can work, compressed; counted in a real browser, workers included. */
 import { gzipSync } from 'node:zlib';
+import type { BrowserContext } from 'playwright-core';
+import { DEMO_PEOPLE, openBrowser, signIn } from '#tests/support/browser.ts';
+import { startApp } from '#tests/support/running-app.ts';
 import type { Figure } from './run.ts';
 
-interface Chunk {
-  readonly file: string;
-  readonly isEntry?: boolean;
-  readonly src?: string;
-  readonly imports?: readonly string[];
-}
+const SIGN_IN_KB = 150;
+const REPORT_KB = 450;
 
-const CLIENT = join(import.meta.dirname, '../../dist/client');
-
-/** The entry and the screen with everything they import statically; what a screen loads later counts for itself. */
 export async function benchmarks(): Promise<Figure[]> {
-  const manifest = JSON.parse(readFileSync(join(CLIENT, '.vite/manifest.json'), 'utf8')) as Record<
-    string,
-    Chunk
-  >;
-  const entry = Object.keys(manifest).filter((name) => manifest[name]?.isEntry);
-  const screen = (part: string) =>
-    Object.keys(manifest).filter((name) => manifest[name]?.src?.includes(part));
-  const signIn = kilobytes(manifest, [...entry, ...screen('session/routes/')]);
-  const report = kilobytes(manifest, [
-    ...entry,
-    ...screen('app/report-screen'),
-    ...screen('features/report/routes/'),
-  ]);
-  return [
-    { name: 'script of sign in', value: signIn, reach: 150, unit: 'kB', ok: signIn <= 150 },
-    { name: 'script of the report, in all', value: report, reach: 450, unit: 'kB', ok: report <= 450 },
-  ];
+  const [app, browser] = await Promise.all([startApp(), openBrowser()]);
+  try {
+    const signedOut = await browser.newContext();
+    const first = countScripts(signedOut);
+    const page = await signedOut.newPage();
+    await page.goto(app.url);
+    await page.getByRole('button', { name: 'Sign in', exact: true }).waitFor();
+    await page.waitForLoadState('networkidle');
+    const atSignIn = await first();
+    await signIn(page, app.url, DEMO_PEOPLE.member);
+
+    const signedIn = await browser.newContext({ storageState: await signedOut.storageState() });
+    const all = countScripts(signedIn);
+    const report = await signedIn.newPage();
+    await report.goto(`${app.url}/team/tern-rock/problem/1/report#4`);
+    await report.locator('canvas').first().waitFor();
+    await report.locator('.katex').first().waitFor();
+    await report.waitForLoadState('networkidle');
+    return [
+      figure('script of sign in', atSignIn, SIGN_IN_KB),
+      figure('script of the report, in all', await all(), REPORT_KB),
+    ];
+  } finally {
+    await browser.close();
+    await app.stop();
+  }
 }
 
-function kilobytes(manifest: Record<string, Chunk>, roots: readonly string[]): number {
-  const files = new Set<string>();
-  const visit = (name: string) => {
-    const chunk = manifest[name];
-    if (!chunk || files.has(chunk.file)) return;
-    files.add(chunk.file);
-    chunk.imports?.forEach(visit);
+/** Notes every script that comes; gives their compressed size in kB. */
+function countScripts(context: BrowserContext): () => Promise<number> {
+  const scripts = new Map<string, Promise<Buffer>>();
+  context.on('response', (response) => {
+    if (new URL(response.url()).pathname.endsWith('.js')) scripts.set(response.url(), response.body());
+  });
+  return async () => {
+    const bodies = await Promise.all(scripts.values());
+    return bodies.reduce((sum, body) => sum + gzipSync(body).length, 0) / 1000;
   };
-  roots.forEach(visit);
-  const bytes = [...files]
-    .filter((file) => file.endsWith('.js'))
-    .reduce((sum, file) => sum + gzipSync(readFileSync(join(CLIENT, file))).length, 0);
-  return bytes / 1000;
+}
+
+function figure(name: string, value: number, reach: number): Figure {
+  return { name, value, reach, unit: 'kB', ok: value <= reach };
 }
