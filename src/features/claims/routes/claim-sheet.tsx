@@ -19,7 +19,7 @@ export function ClaimSheet() {
   const { evidence, findings } = useFindingsSnapshot();
   const { address, mayWrite } = useProblem();
   const [open, setOpen] = useState<string | 'new' | null>(null);
-  useStationCup('claim sheet');
+  useStationCup('claims');
   const close = () => setOpen(null);
   const { claims, settings } = evidence;
   return (
@@ -100,7 +100,7 @@ function ClaimRow({
   readonly onChange: (() => void) | null;
 }) {
   return (
-    <div className="grid grid-cols-[70px_1fr_290px_110px] items-center gap-y-2 py-5 max-[900px]:grid-cols-[40px_1fr]">
+    <div className="grid grid-cols-[70px_1fr_290px_110px] items-center gap-y-2 py-5 max-[900px]:grid-cols-[40px_minmax(0,1fr)]">
       <span className="self-start font-report text-xl text-ink-3">{claim.n}</span>
       <div className="pr-6">
         <p className="font-report text-lg font-medium">{claim.text}</p>

@@ -23,10 +23,10 @@ export function BudgetTable({ output, point, where, predicted }: BudgetTableProp
   const most = rows[0]?.share ?? 1;
   return (
     <section className="mt-6">
-      <h3 className="font-report text-[19px]/6.5 font-medium">
+      <h2 className="font-report text-[19px]/6.5 font-medium">
         Uncertainty budget of <QuantitySymbol symbol={output.symbol} />
         {where && ` at ${where}`}
-      </h3>
+      </h2>
       <table className="mt-1 w-full border-collapse text-sm">
         <thead>
           <tr className="border-b-[1.25px] border-ink text-left text-xs text-ink-2">

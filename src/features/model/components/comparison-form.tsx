@@ -67,7 +67,7 @@ export function ComparisonForm({ model, id, onClose }: ComparisonFormProps) {
       className="page-sheet px-7 pt-6 pb-5 max-sm:px-4"
       onSubmit={(event) => void keep(event)}
     >
-      <h2 className="font-report text-2xl/[30px] font-medium">
+      <h2 className="font-report text-[24px]/[30px] font-medium">
         {before ? before.name : `New comparison with model ${model.n}`}
       </h2>
       <div className="mt-4 grid gap-4">

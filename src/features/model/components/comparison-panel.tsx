@@ -45,7 +45,7 @@ export function ComparisonPanel({
     <section className="page-sheet px-7 pt-6 pb-4.5 max-sm:px-4" aria-label="Comparison">
       <header className="mb-2.5 flex flex-wrap items-end gap-x-5 gap-y-2">
         <div>
-          <h2 className="font-report text-2xl/[30px] font-medium">Comparison</h2>
+          <h2 className="font-report text-[24px]/[30px] font-medium">Comparison</h2>
           <p className="text-sm text-ink-2">
             {comparison ? (
               <Menu

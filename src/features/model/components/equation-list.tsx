@@ -15,14 +15,21 @@ export function EquationList({ model }: { readonly model: Model }) {
   const agreed = unitsSentence(model, views);
   return (
     <>
-      <dl className="mt-3.5 border-y border-hair py-3 text-report">
+      <dl className="mt-3.5 border-y border-hair py-3 text-[16.5px]">
         {views.map(({ quantity, latex, typed, fault }, index) => (
           <div key={model.equations[index]?.defines} className="flex min-h-10 flex-wrap items-center gap-y-1">
             <dt className="w-26 flex-none text-xs text-ink-3">
               {quantity?.name ?? 'a quantity that is gone'}
             </dt>
-            <dd className="relative min-w-0 flex-1 overflow-x-auto py-1">
-              {latex ? <Katex latex={latex} /> : <code className="font-code text-sm">{typed}</code>}
+            <dd className="min-w-0 flex-1">
+              <div
+                className="relative overflow-x-auto py-1"
+                role="group"
+                aria-label={`${quantity?.name ?? 'formula'}, formula`}
+                tabIndex={0}
+              >
+                {latex ? <Katex latex={latex} /> : <code className="font-code text-sm">{typed}</code>}
+              </div>
             </dd>
             {fault && (
               <Notice title={`Formula ${index + 1}.`} className="w-full">

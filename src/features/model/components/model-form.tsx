@@ -62,7 +62,7 @@ export function ModelForm({ from, isNew, onClose }: ModelFormProps) {
       className="page-sheet px-7 py-6.5 max-sm:px-4"
       onSubmit={(event) => void keep(event)}
     >
-      <h1 className="font-report text-2xl/[30px] font-medium">
+      <h1 className="font-report text-[24px]/[30px] font-medium">
         {isNew ? 'A new model' : `Model ${before?.n ?? ''}`}
       </h1>
       <Field label="Name" placeholder="thin jet, no drag" frameClassName="mt-3" {...register('name')} />

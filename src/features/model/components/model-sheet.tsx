@@ -32,7 +32,7 @@ export function ModelSheet({ model, shown, actions }: ModelSheetProps) {
   const trusted = useMemo(() => trustedSentences(model, evidence), [model, evidence]);
   return (
     <section className="page-sheet px-7 py-6.5 max-sm:px-4" aria-label={`Model ${model.n}`}>
-      <h1 className="font-report text-2xl/[30px] font-medium">Model {model.n}</h1>
+      <h1 className="font-report text-[24px]/[30px] font-medium">Model {model.n}</h1>
       {model.name && <p className="text-sm text-ink-2">{model.name}</p>}
       <EquationList model={model} />
       {output && point?.predicted && (
@@ -44,7 +44,7 @@ export function ModelSheet({ model, shown, actions }: ModelSheetProps) {
           where={settingWords(point.settings, shown, evidence)}
         />
       )}
-      <h3 className="mt-6 font-report text-[19px]/6.5 font-medium">Fit</h3>
+      <h2 className="mt-6 font-report text-[19px]/6.5 font-medium">Fit</h2>
       {fits.length === 0 && (
         <p className="font-report text-[17px]/[26px] text-pretty text-ink-2">
           Nothing is fitted; the model predicts with what is known already.
@@ -53,7 +53,7 @@ export function ModelSheet({ model, shown, actions }: ModelSheetProps) {
       {fits.map((fit) => (
         <FitSentence key={fit.id} finding={findings.comparisons.get(fit.id)} />
       ))}
-      <h3 className="mt-6 font-report text-[19px]/6.5 font-medium">Trusted</h3>
+      <h2 className="mt-6 font-report text-[19px]/6.5 font-medium">Trusted</h2>
       <p className="font-report text-[17px]/[26px] text-pretty text-ink-2">{trusted.join(' ')}</p>
       {model.assumptions.length > 0 && (
         <ul className="mt-2 text-sm text-ink-2">

@@ -27,7 +27,7 @@ export function ModelStation({ claims }: { readonly claims: ReactNode }) {
   const model = modelAt(n, evidence);
   const comparison = model ? comparisonAt(chosen, model, evidence) : null;
   const toModel = (number: number) => void navigate(paths.model(address, number));
-  useStationCup(model ? `model ${model.n}` : 'no model yet');
+  useStationCup(model ? `model ${model.n}` : 'no model');
   const closeModel = (kept: string | null) => {
     setForm(null);
     const made = evidence.models.find(({ id }) => id === kept);
@@ -117,7 +117,7 @@ function comparisonAt(
 function FirstModel({ onStart }: { readonly onStart: (() => void) | null }) {
   return (
     <section className="page-sheet px-7 py-6.5" aria-label="Model">
-      <h1 className="font-report text-2xl/[30px] font-medium">Model</h1>
+      <h1 className="font-report text-[24px]/[30px] font-medium">Model</h1>
       <p className="mt-3 border-t border-hair pt-3 text-ink-3 italic">
         R = …, the quantity you measure, by those you set and know
       </p>

@@ -1,4 +1,5 @@
 import type { Evidence, Quantity } from '#shared/evidence/evidence.ts';
+import { findSource } from '#shared/evidence/find-source.ts';
 import type { Findings, Scalar } from '#shared/evidence/findings.ts';
 import { uncertaintyBudget } from '#shared/uncertainty/uncertainty-budget.ts';
 
@@ -16,7 +17,7 @@ export interface BudgetRow {
 export function budgetRows(scalar: Scalar, evidence: Evidence, findings: Findings): BudgetRow[] {
   const rows = new Map<string, BudgetRow>();
   for (const { source, share } of uncertaintyBudget(scalar.parts)) {
-    const words = findings.sources.get(source)?.words ?? 'a source that is not named';
+    const { words } = findSource(findings, evidence, source);
     const quantity = quantityOfSource(source, evidence);
     const key = `${quantity?.id ?? ''} ${words}`;
     const before = rows.get(key);
@@ -34,6 +35,7 @@ function quantityOfSource(source: string, evidence: Evidence): Quantity | null {
       return find(first);
     case 'trial':
     case 'held':
+    case 'set':
       return find(second) ?? find(first);
     case 'mean':
       return find(source.slice('mean:'.length).split('@')[0]);

@@ -117,7 +117,14 @@ function ReasonCell({ line, span }: { readonly line: TrialLine; readonly span: n
         <span className="truncate" title={line.trial.excluded?.reason}>
           {line.trial.excluded?.reason}
         </span>
-        {mayWrite && <Word onClick={() => void bringBack(line.trial.id, line.name)}>Bring back</Word>}
+        {mayWrite && (
+          <Word
+            className="leading-4 whitespace-nowrap"
+            onClick={() => void bringBack(line.trial.id, line.name)}
+          >
+            Bring back
+          </Word>
+        )}
       </span>
     </td>
   );

@@ -134,7 +134,19 @@ function columnsOf({ settings, readings, drawn, model }: SeriesView, scale: Shar
         header: () => <QuantityHead quantity={quantity} withUnit />,
       }),
     ),
-    ...(scale ? [column.display({ id: 'strip', header: () => <StripHead scale={scale} /> })] : []),
+    ...(scale
+      ? [
+          column.display({
+            id: 'strip',
+            header: () => (
+              <>
+                <span className="sr-only">Drawn on a scale</span>
+                <StripHead scale={scale} />
+              </>
+            ),
+          }),
+        ]
+      : []),
     ...(drawn ? [column.display({ id: 'mean', header: () => <MeanHead quantity={drawn} /> })] : []),
     ...(model ? [column.display({ id: 'z', header: () => <QuantitySymbol symbol="z" /> })] : []),
     column.accessor(({ line }) => line.trial.by, { id: 'logged', header: 'Logged' }),

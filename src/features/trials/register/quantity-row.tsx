@@ -1,5 +1,6 @@
 import type { Quantity } from '#shared/evidence/evidence.ts';
 import { QuantitySymbol } from '#src/components/quantity-symbol.tsx';
+import { SentenceText } from '#src/components/sentence-text.tsx';
 import { Triangle } from '#src/components/triangle.tsx';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
 import { quantityValue, type QuantityValue } from './quantity-value.ts';
@@ -36,7 +37,9 @@ export function QuantityRow({
       </span>
       <span className="text-ink-2">
         {name}
-        <span className="block text-2xs text-ink-3">{source || STATUS_WORDS[status]}</span>
+        <span className="block text-2xs text-ink-3">
+          <SentenceText text={source || STATUS_WORDS[status]} />
+        </span>
       </span>
     </>
   );

@@ -18,7 +18,7 @@ export function Register() {
     form?.kind === kind && form.id === id;
   return (
     <aside className="page-sheet px-6 pt-5.5 pb-3 max-sm:px-4" aria-label="Quantities and instruments">
-      <h2 className="font-report text-2xl/[30px] font-medium">Quantities</h2>
+      <h2 className="font-report text-[24px]/[30px] font-medium">Quantities</h2>
       <ul className="mt-3">
         {quantities.map((quantity) =>
           isOpen('quantity', quantity.id) ? (
