@@ -25,7 +25,7 @@ afterAll(async () => {
 const row = (page: Page, name: string) => page.locator(`tr#${name}`);
 
 async function log(page: Page, lean: string, range: string): Promise<void> {
-  await page.getByLabel('lean of the can, θ').fill(lean);
+  await page.getByLabel('lean of the can, θ', { exact: true }).fill(lean);
   await page.getByLabel('range on the tray, R', { exact: true }).fill(range);
   await page.getByLabel('Uncertainty of range on the tray').fill('0.4');
   await page.getByRole('button', { name: 'Log trial' }).click();
@@ -33,12 +33,12 @@ async function log(page: Page, lean: string, range: string): Promise<void> {
 
 describe('trials', () => {
   test('before logging: the bar says what was predicted and how far the reading is from it', async () => {
-    await kasimir.getByLabel('lean of the can, θ').fill('45');
+    await kasimir.getByLabel('lean of the can, θ', { exact: true }).fill('45');
     await kasimir.getByLabel('range on the tray, R', { exact: true }).fill('44.7');
 
     await expect
       .poll(() => kasimir.getByLabel('The next trial').textContent())
-      .toMatch(/Predicted .* cm.*short/);
+      .toMatch(/Predicted.*\scm, so this reads.*\sshort/);
   });
 
   test('when two people log at once: each sees the other within a second, and no number is given twice', async () => {
