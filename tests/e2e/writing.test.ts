@@ -129,4 +129,26 @@ describe('the report', () => {
     expect(await odile.getByRole('toolbar', { name: 'Put in' }).count()).toBe(0);
     await odile.context().close();
   });
+
+  test('as a page of an older version: it is refused before it can sync, and says what to do', async () => {
+    const { page } = await person(browser, app.url, DEMO_PEOPLE.member);
+    const before = await page.request.get(`${app.url}/api/teams/tern-rock/problems/1/report`);
+    await page.routeWebSocket(/\/collaboration/, (socket) => {
+      const server = socket.connectToServer();
+      socket.onMessage((message) => {
+        const older = Buffer.from(message as Buffer);
+        const at = older.indexOf('schema:1');
+        if (at >= 0) older.write('schema:0', at);
+        server.send(older);
+      });
+    });
+
+    await page.goto(`${app.url}/team/tern-rock/problem/1/report`);
+
+    await page.getByText('This page is of another version than the server.').waitFor();
+    await page.getByRole('button', { name: 'Load again' }).waitFor();
+    const after = await page.request.get(`${app.url}/api/teams/tern-rock/problems/1/report`);
+    expect(await after.text()).toBe(await before.text());
+    await page.context().close();
+  });
 });
