@@ -17,7 +17,16 @@ runChild(
     join('server', 'index.ts'),
   ],
   { cwd: ROOT, env: { NODE_ENV: 'development', ...process.env } },
-  (message) => {
-    if (typeof message?.ready === 'string') void announce(message.ready);
-  },
 );
+
+// The watcher stands between us and the server, so its word that it is ready does not reach us: ask.
+const url = `http://${process.env.HOST ?? '127.0.0.1'}:${process.env.PORT ?? '4600'}`;
+for (;;) {
+  await new Promise((resolve) => setTimeout(resolve, 500));
+  const isThere = await fetch(`${url}/api/health`).then(
+    ({ ok }) => ok,
+    () => false,
+  );
+  if (isThere) break;
+}
+await announce(url);

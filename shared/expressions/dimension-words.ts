@@ -64,10 +64,14 @@ export function mismatchHint(left: Dimension, right: Dimension): string {
   const two = { n: 2n, d: 1n };
   if (sameDimension(right, powerDimension(left, two))) return 'Is a square root missing?';
   if (sameDimension(left, powerDimension(right, two))) return 'Is a square missing?';
-  const quotient = divideDimensions(right, left);
-  const inverse = divideDimensions(left, right);
-  const divided = kindOfQuantity(quotient);
-  const multiplied = kindOfQuantity(inverse);
+  const divided = simpleKind(divideDimensions(right, left));
+  const multiplied = simpleKind(divideDimensions(left, right));
   if (divided !== null) return `Is a division by ${divided} missing?`;
-  return multiplied === null ? '' : `Is a factor missing that is ${multiplied}?`;
+  return multiplied === null ? '' : `Is a multiplication by ${multiplied} missing?`;
+}
+
+/** Only what people lose from formulas: a length, a time or a mass. */
+function simpleKind(value: Dimension): string | null {
+  const kind = kindOfQuantity(value);
+  return kind === 'a length' || kind === 'a time' || kind === 'a mass' ? kind : null;
 }

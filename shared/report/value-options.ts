@@ -4,7 +4,7 @@ import { keyOf } from '#shared/evidence/keys.ts';
 import type { Findings, Hue } from '#shared/evidence/findings.ts';
 import { sameSymbol, splitSymbol, symbolToText } from '#shared/formatting/symbol.ts';
 import { showValue } from './live-value.ts';
-import { nearness, sentenceHints, type SentenceHints } from './sentence-hints.ts';
+import { sentenceHints, type SentenceHints } from './sentence-hints.ts';
 import { settingCandidates } from './setting-candidates.ts';
 
 /** One value that may be tied. */

@@ -50,7 +50,9 @@ function launch(data: string, port: string): Promise<{ child: ChildProcess; url:
     child.on('message', (message: { ready?: string }) => {
       if (message.ready) resolve({ child, url: message.ready });
     });
-    child.on('exit', (code) => reject(new Error(`The server ended with ${code} before it was ready:\n${said}`)));
+    child.on('exit', (code) =>
+      reject(new Error(`The server ended with ${code} before it was ready:\n${said}`)),
+    );
   });
 }
 

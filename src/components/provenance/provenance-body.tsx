@@ -47,7 +47,7 @@ export function ProvenanceBody({ reference, unit = null, standsIn = null, childr
         </strong>
         <span className="text-right text-xs text-ink-2">
           {card.kind}
-          {card.shown.scalar?.u != null && (
+          {typeof card.shown.scalar?.u === 'number' && (
             <>
               , <i className="font-report">k</i> = 1
             </>
