@@ -10,6 +10,7 @@ import type { ParserNode } from './plain-parser.ts';
 import type { Pieces } from './pieces.ts';
 import { expressionFault } from './tokens.ts';
 
+/** The tree, or the part of the text that makes none. */
 export type NodeResult =
   | { readonly ok: true; readonly node: ExpressionNode }
   | { readonly ok: false; readonly fault: ExpressionFault };

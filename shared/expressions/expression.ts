@@ -15,7 +15,9 @@ export interface NamedSymbol {
   readonly symbol: string;
 }
 
+/** Signs that compare; `==` and `!=` are exact. */
 export type ComparisonOperator = '<' | '<=' | '>' | '>=' | '==' | '!=';
+/** Signs that compute, in the parser's usual order. */
 export type BinaryOperator = '+' | '-' | '*' | '/' | '^';
 
 /** One node of an expression; every node knows the piece of shown text it came from. */
@@ -92,10 +94,12 @@ export interface ExpressionFault {
   readonly suggestions: readonly string[];
 }
 
+/** An expression, or the first fault of a text with the text as it is shown. */
 export type ParseResult =
   | { readonly ok: true; readonly expression: Expression }
   | { readonly ok: false; readonly fault: ExpressionFault; readonly shown: string };
 
+/** The dimension of an expression, or the first place where units do not agree. */
 export type DimensionResult =
   | { readonly ok: true; readonly dimension: Dimension }
   | { readonly ok: false; readonly fault: ExpressionFault };

@@ -3,6 +3,7 @@
  * set round it.
  */
 export const BINDING = { choice: 0, comparison: 1, sum: 2, product: 3, power: 4, atom: 5 } as const;
+/** One of them. */
 export type Binding = (typeof BINDING)[keyof typeof BINDING];
 
 /** A piece of LaTeX and what must be known of it to set it beside another. */

@@ -87,7 +87,7 @@ function depthOf(root: ExpressionNode): number {
 }
 
 /** The nodes right below one. */
-export function childrenOf(node: ExpressionNode): readonly ExpressionNode[] {
+function childrenOf(node: ExpressionNode): readonly ExpressionNode[] {
   switch (node.kind) {
     case 'negative':
       return [node.of];

@@ -17,5 +17,6 @@ export interface Pieces {
   readonly edits: readonly { readonly span: Span; readonly text: string }[];
 }
 
+/** The pieces of a text, or its first fault. */
 export type PiecesResult =
   { readonly ok: true; readonly pieces: Pieces } | { readonly ok: false; readonly fault: ExpressionFault };

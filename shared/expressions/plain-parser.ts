@@ -15,6 +15,7 @@ export interface ParserNode {
   readonly params?: readonly ParserNode[];
 }
 
+/** The parser's tree, or where it stopped. */
 export type ParserResult =
   | { readonly ok: true; readonly node: ParserNode }
   /** `at` is the position in the plain text, from 0. */

@@ -2,8 +2,9 @@ import { findGreekLetter } from '#shared/formatting/greek-letters.ts';
 import { splitSymbol, symbolToText } from '#shared/formatting/symbol.ts';
 import { findNamedUnit } from '#shared/units/find-named-unit.ts';
 import { suggestUnits } from '#shared/units/suggest-unit.ts';
-import type { NamedSymbol } from './expression.ts';
+import type { ExpressionFault, NamedSymbol } from './expression.ts';
 import { FUNCTION_NAMES } from './functions.ts';
+import { expressionFault, type Token } from './tokens.ts';
 
 /** Ids by symbol, whichever way a symbol is spelled. */
 export class SymbolTable {
@@ -33,6 +34,23 @@ export class SymbolTable {
     const areSymbols = pieces.every((piece) => piece === 'π' || this.find(piece) !== null);
     return pieces.length > 1 && new Set(pieces).size === pieces.length && areSymbols ? pieces : null;
   }
+}
+
+/**
+ * The fault of a name that stands for nothing here.
+ *
+ * @param next - token behind it: a round bracket means that it was called
+ * @example unknownNameFault({ kind: 'name', text: 'q', span: { from: 0, to: 1 }, spaced: false }, undefined, new SymbolTable([]), false).code // => 'unknown symbol'
+ */
+export function unknownNameFault(
+  token: Extract<Token, { kind: 'name' }>,
+  next: Token | undefined,
+  table: SymbolTable,
+  isAfterNumber: boolean,
+): ExpressionFault {
+  const isCalled = next?.kind === 'sign' && next.text === '(';
+  const { code, sentence, suggestions } = unknownName(token.text, isCalled, table, isAfterNumber);
+  return expressionFault(code ?? 'unknown symbol', sentence, token.span, suggestions);
 }
 
 const WORDS: Readonly<Record<string, string>> = {

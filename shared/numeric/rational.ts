@@ -19,8 +19,9 @@ export function rational(n: bigint, d = 1n): Rational {
   return { n: (sign * n) / divisor, d: (sign * d) / divisor };
 }
 
-/** Nought and one, so that they need not be made again. */
+/** Nought, so that it need not be made again. */
 export const RATIONAL_ZERO: Rational = { n: 0n, d: 1n };
+/** One, likewise. */
 export const RATIONAL_ONE: Rational = { n: 1n, d: 1n };
 
 /**

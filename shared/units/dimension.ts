@@ -21,10 +21,11 @@ export const BASE_QUANTITIES = [
   'angle',
   'count',
 ] as const;
+/** Name of one of them. */
 export type BaseQuantity = (typeof BASE_QUANTITIES)[number];
 
 /** Number of SI base quantities; exponents behind it are tags. */
-export const SI_BASE_COUNT = 7;
+const SI_BASE_COUNT = 7;
 
 /**
  * What kind of quantity a value is: one exact exponent for each of BASE_QUANTITIES, in that order.

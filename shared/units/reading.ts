@@ -18,6 +18,7 @@ export interface TypedReading {
   readonly u?: string | undefined;
 }
 
+/** What readSi gives: the value in SI, or what is wrong with which part of the reading. */
 export type SiReading =
   | {
       readonly ok: true;

@@ -8,6 +8,7 @@ export interface TypedParts {
   readonly unit: string;
 }
 
+/** Why a text cannot be taken apart, and a text to write in its place where one is likely. */
 export interface SplitRefusal {
   readonly code: 'empty' | 'not a number' | 'ambiguous text' | 'dimension mismatch';
   readonly sentence: string;

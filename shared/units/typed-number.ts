@@ -8,6 +8,7 @@ import { splitTypedNumber, type TypedParts } from './split-typed-number.ts';
 import { unitGap, unitSigns } from './unit-signs.ts';
 import type { Unit } from './unit.ts';
 
+/** What parseTypedNumber gives: a reading and what was understood, or what is wrong. */
 export type TypedNumber =
   | {
       readonly ok: true;
