@@ -63,8 +63,8 @@ describe.each(['light', 'dark'] as const)('in %s', (theme) => {
   });
 
   test('Sign in', async () => {
-    const page = await browser.newPage();
-    expect(await findings(page, '/', theme)).toEqual([]);
-    await page.close();
+    const context = await browser.newContext();
+    expect(await findings(await context.newPage(), '/', theme)).toEqual([]);
+    await context.close();
   });
 });

@@ -53,8 +53,10 @@ export function ComparisonChartView({ chart, finding, onOpenPoint }: ComparisonC
         </div>
       )}
       {card.open && <PointCard card={card} width={width} />}
-      <div className="mt-1 text-right text-xs">
-        <Word onClick={() => setIsTable(!isTable)}>{isTable ? 'See as chart' : 'See as table'}</Word>
+      <div className="my-1 text-right text-xs">
+        <Word className="min-h-6" onClick={() => setIsTable(!isTable)}>
+          {isTable ? 'See as chart' : 'See as table'}
+        </Word>
       </div>
     </div>
   );
