@@ -14,6 +14,22 @@ export const evidenceStepSchema = z.object({
 });
 export type EvidenceStep = z.infer<typeof evidenceStepSchema>;
 
+/** What a `stale` event may name, each a query of the client's. */
+export const STALE = [
+  'team',
+  'problems',
+  'problem',
+  'report',
+  'notes',
+  'editions',
+  'copies',
+  'leaks',
+  'slides',
+  'invitations',
+  'outbox',
+] as const;
+export type Stale = (typeof STALE)[number];
+
 /** Messages on the event stream, one JSON object each. */
 export const serverEventSchema = z.discriminatedUnion('type', [
   z.object({
@@ -32,7 +48,7 @@ export const serverEventSchema = z.discriminatedUnion('type', [
   /** Something else of the team or the problem changed: ask again. */
   z.object({
     type: z.literal('stale'),
-    what: z.enum(['team', 'problems', 'problem', 'report']),
+    what: z.enum(STALE),
     team: z.string(),
     number: z.number().int().optional(),
   }),

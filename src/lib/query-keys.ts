@@ -1,3 +1,4 @@
+import type { Stale } from '#shared/contracts/evidence-changes.ts';
 import type { ProblemAddress } from './problem/problem-address.ts';
 
 /** One place for the keys of server data, so that an event can name what has become old. */
@@ -9,4 +10,8 @@ export const queryKeys = {
   problem: ({ team, number }: ProblemAddress) => ['team', team, 'problem', number] as const,
   evidence: ({ team, number }: ProblemAddress) => ['team', team, 'problem', number, 'evidence'] as const,
   report: ({ team, number }: ProblemAddress) => ['team', team, 'problem', number, 'report'] as const,
+  /** Everything else that is asked for about a team, by the name that a `stale` event gives it. */
+  ofTeam: (team: string, what: Stale) => ['team', team, what] as const,
+  ofProblem: ({ team, number }: ProblemAddress, what: Stale) =>
+    ['team', team, 'problem', number, what] as const,
 };

@@ -15,6 +15,8 @@ const SHARED_ORDER = [
   'evidence',
   'claims',
   'report',
+  'notes',
+  'editions',
   'leaks',
   'talk',
   'contracts',

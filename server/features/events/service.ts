@@ -1,5 +1,5 @@
 import type { WebSocket } from 'ws';
-import type { EvidenceStep, ServerEvent } from '#shared/contracts/evidence-changes.ts';
+import type { EvidenceStep, ServerEvent, Stale } from '#shared/contracts/evidence-changes.ts';
 import type { ProblemPlace, TeamPlace } from '#server/features/teams/service.ts';
 import type { Actor } from '#server/middleware/actor.ts';
 
@@ -59,7 +59,7 @@ export class EventHub {
   }
 
   /** Something of the team, or of one of its problems, is to be asked for again. */
-  publishStale(place: TeamPlace, what: 'team' | 'problems' | 'problem' | 'report', number?: number): void {
+  publishStale(place: TeamPlace, what: Stale, number?: number): void {
     const event: ServerEvent = {
       type: 'stale',
       what,

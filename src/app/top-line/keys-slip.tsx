@@ -1,11 +1,12 @@
 import { Dialog } from 'radix-ui';
 import type { ReactNode } from 'react';
 import { Word } from '#src/components/word.tsx';
+import { STATIONS } from '#src/lib/paths.ts';
 import { digitKeys } from '#src/lib/preferences/digit-keys.ts';
 import { useStore } from '#src/lib/store/use-store.ts';
 
 const KEYS: readonly (readonly [key: ReactNode, does: string])[] = [
-  ['1 to 3', 'the stations, in their order'],
+  [`1 to ${STATIONS.length}`, 'the stations, in their order'],
   ['0', 'the Season'],
   ['F6', 'from the page to the entry bar or the sill; with Shift, back'],
   [

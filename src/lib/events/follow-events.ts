@@ -28,15 +28,17 @@ export function followEvents(stream: EventStream, client: QueryClient): () => vo
   };
 }
 
+/** Screens of the season count what each problem has, so that they ask again too. */
 function forgetStale(client: QueryClient, event: Extract<ServerEvent, { type: 'stale' }>): void {
-  const { team, what } = event;
-  if (what === 'team' || what === 'problems' || event.number === undefined) {
-    const queryKey = what === 'team' ? queryKeys.team(team) : queryKeys.problems(team);
-    void client.invalidateQueries({ queryKey, exact: true });
-    return;
+  const { team, what, number } = event;
+  const forget = (queryKey: readonly unknown[], exact = true) =>
+    void client.invalidateQueries({ queryKey, exact });
+  if (what === 'team') forget(queryKeys.team(team));
+  else if (number === undefined) forget(queryKeys.ofTeam(team, what), what === 'problems');
+  else {
+    const address = { team, number };
+    if (what === 'problem') forget(queryKeys.problem(address));
+    else forget(queryKeys.ofProblem(address, what), false);
+    forget(queryKeys.problems(team));
   }
-  const address = { team, number: event.number };
-  const queryKey = what === 'report' ? queryKeys.report(address) : queryKeys.problem(address);
-  void client.invalidateQueries({ queryKey, exact: true });
-  void client.invalidateQueries({ queryKey: queryKeys.problems(team), exact: true });
 }
