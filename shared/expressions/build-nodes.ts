@@ -1,12 +1,6 @@
 import { readSi } from '#shared/units/reading.ts';
-import type {
-  BinaryOperator,
-  ComparisonOperator,
-  ExpressionFault,
-  ExpressionNode,
-  Span,
-} from './expression.ts';
-import type { ParserNode } from './plain-parser.ts';
+import type { BinaryOperator, ExpressionFault, ExpressionNode, Span } from './expression.ts';
+import type { PlainNode } from './plain-parser.ts';
 import type { Pieces } from './pieces.ts';
 import { expressionFault } from './tokens.ts';
 
@@ -15,17 +9,8 @@ export type NodeResult =
   | { readonly ok: true; readonly node: ExpressionNode }
   | { readonly ok: false; readonly fault: ExpressionFault };
 
-const COMPARISONS: Readonly<Record<string, ComparisonOperator>> = {
-  smaller: '<',
-  smallerEq: '<=',
-  larger: '>',
-  largerEq: '>=',
-  equal: '==',
-  unequal: '!=',
-};
-
 /** Turns the parser's tree into our nodes: names become what they stand for, and every node gets its place. */
-export function buildNodes(root: ParserNode, pieces: Pieces): NodeResult {
+export function buildNodes(root: PlainNode, pieces: Pieces): NodeResult {
   try {
     return { ok: true, node: new NodeBuilder(pieces).build(root) };
   } catch (error) {
@@ -44,65 +29,48 @@ class UnusablePart extends Error {
 class NodeBuilder {
   constructor(private readonly pieces: Pieces) {}
 
-  build(node: ParserNode): ExpressionNode {
-    switch (node.type) {
-      case 'SymbolNode':
-        return this.leaf(node);
-      case 'ParenthesisNode':
-        return this.bracketed(this.build(required(node.content)));
-      case 'OperatorNode':
-        return this.operator(node);
-      case 'FunctionNode':
-        return this.call(node);
-      case 'RelationalNode':
-        return this.chain(node);
-      case 'ConditionalNode':
-        return this.choice(node);
-      default:
-        throw new UnusablePart(
-          expressionFault('syntax', 'This cannot be read as a formula.', { from: 0, to: this.end() }),
+  build(node: PlainNode): ExpressionNode {
+    switch (node.kind) {
+      case 'leaf':
+        return required(this.pieces.leaves[node.index]);
+      case 'bracketed':
+        return this.bracketed(this.build(node.of));
+      case 'signed': {
+        const of = this.build(node.of);
+        return node.sign === '-' ? negated(of, this.fromSignBefore(of.span)) : of;
+      }
+      case 'binary':
+        return this.binary(node.operator, this.build(node.left), this.build(node.right));
+      case 'call': {
+        const { name, span } = required(this.pieces.calls[node.index]);
+        return { kind: 'call', name, inputs: node.inputs.map((input) => this.build(input)), span };
+      }
+      case 'comparison': {
+        const terms = node.terms.map((term) => this.build(term));
+        const span = joined(required(terms[0]).span, required(terms.at(-1)).span);
+        return { kind: 'comparison', operators: node.operators, terms, span };
+      }
+      case 'choice': {
+        const [when, then, otherwise] = [node.when, node.then, node.otherwise].map((part) =>
+          this.build(part),
         );
+        const span = joined(required(when).span, required(otherwise).span);
+        return {
+          kind: 'choice',
+          when: required(when),
+          then: required(then),
+          otherwise: required(otherwise),
+          span,
+        };
+      }
     }
   }
 
-  private leaf(node: ParserNode): ExpressionNode {
-    return required(this.pieces.leaves[indexOf(node.name)]);
-  }
-
-  private operator(node: ParserNode): ExpressionNode {
-    const [first, second] = required(node.args);
-    const left = this.build(required(first));
-    if (second === undefined) {
-      return node.op === '-' ? negated(left, this.fromSignBefore(left.span)) : left;
-    }
-    const right = this.build(second);
+  private binary(operator: BinaryOperator, left: ExpressionNode, right: ExpressionNode): ExpressionNode {
     const span = joined(left.span, right.span);
-    const operator = required(node.op);
-    if (isComparison(operator))
-      return { kind: 'comparison', operators: [operator], terms: [left, right], span };
     const affine = affineFault(operator, left, right, span);
     if (affine !== null) throw new UnusablePart(affine);
-    return { kind: 'binary', operator: operator as BinaryOperator, left, right, span };
-  }
-
-  private call(node: ParserNode): ExpressionNode {
-    const { fn } = node;
-    const { name, span } = required(this.pieces.calls[indexOf(typeof fn === 'string' ? fn : fn?.name)]);
-    return { kind: 'call', name, inputs: required(node.args).map((input) => this.build(input)), span };
-  }
-
-  private chain(node: ParserNode): ExpressionNode {
-    const terms = required(node.params).map((term) => this.build(term));
-    const operators = required(node.conditionals).map((name) => required(COMPARISONS[name]));
-    const span = joined(required(terms[0]).span, required(terms.at(-1)).span);
-    return { kind: 'comparison', operators, terms, span };
-  }
-
-  private choice(node: ParserNode): ExpressionNode {
-    const when = this.build(required(node.condition));
-    const then = this.build(required(node.trueExpr));
-    const otherwise = this.build(required(node.falseExpr));
-    return { kind: 'choice', when, then, otherwise, span: joined(when.span, otherwise.span) };
+    return { kind: 'binary', operator, left, right, span };
   }
 
   /** The place of what is in brackets takes the brackets in. */
@@ -119,10 +87,6 @@ class NodeBuilder {
     );
     return { from: sign?.span.from ?? span.from, to: span.to };
   }
-
-  private end(): number {
-    return this.pieces.places.at(-1)?.span.to ?? 0;
-  }
 }
 
 /** −20 °C is a point on the scale, not the opposite of 20 °C. */
@@ -136,7 +100,7 @@ function negated(of: ExpressionNode, span: Span): ExpressionNode {
 
 /** What °C allows: one may be added to, compared and subtracted, but neither doubled nor added to another. */
 function affineFault(
-  operator: string,
+  operator: BinaryOperator,
   left: ExpressionNode,
   right: ExpressionNode,
   span: Span,
@@ -152,19 +116,11 @@ function affineFault(
   return expressionFault('ambiguous text', sentence, span);
 }
 
-function isComparison(operator: string): operator is ComparisonOperator {
-  return Object.values(COMPARISONS).some((known) => known === operator);
-}
-
-function indexOf(name: string | undefined): number {
-  return Number(name?.slice(1));
-}
-
 function joined(a: Span, b: Span): Span {
   return { from: Math.min(a.from, b.from), to: Math.max(a.to, b.to) };
 }
 
 function required<T>(value: T | undefined): T {
-  if (value === undefined) throw new TypeError('buildNodes: the parser gave a tree of another form');
+  if (value === undefined) throw new TypeError('buildNodes: needs the tree of these pieces');
   return value;
 }

@@ -35,24 +35,32 @@ export function parseExpression(text: string, symbols: readonly NamedSymbol[]): 
   if (fault !== null) return refused(fault, shown);
   if (!read.ok) return refused(read.fault, shown);
   const parsed = parsePlain(read.pieces.text);
-  if (!parsed.ok) return refused(unfinished(parsed.at, read.pieces), shown);
+  if (!parsed.ok) {
+    const place = placeOf(parsed.at, read.pieces);
+    return refused(parsed.deep ? tooLong(place) : unfinished(place), shown);
+  }
   const built = buildNodes(parsed.node, read.pieces);
   if (!built.ok) return refused(built.fault, shown);
   if (depthOf(built.node) > MAX_DEPTH) {
-    return refused(
-      expressionFault('syntax', 'The formula is too long to read. Split it.', built.node.span),
-      shown,
-    );
+    return refused(tooLong(built.node.span), shown);
   }
   const stored = storedText(shown, read.pieces.edits);
   return { ok: true, expression: { root: built.node, shown, stored, inputs: inputsOf(built.node) } };
 }
 
 /** What the parser itself refuses: only an unfinished choice is left, all else was settled before. */
-function unfinished(at: number, pieces: Pieces): ExpressionFault {
-  const place = pieces.places.findLast((piece) => piece.at <= at) ?? pieces.places.at(-1);
+function unfinished(place: Span): ExpressionFault {
   const sentence = 'This cannot be read as a formula. A choice is written condition ? value : other value.';
-  return expressionFault('syntax', sentence, place?.span ?? { from: 0, to: 1 });
+  return expressionFault('syntax', sentence, place);
+}
+
+function tooLong(place: Span): ExpressionFault {
+  return expressionFault('syntax', 'The formula is too long to read. Split it.', place);
+}
+
+function placeOf(at: number, pieces: Pieces): Span {
+  const place = pieces.places.findLast((piece) => piece.at <= at) ?? pieces.places.at(-1);
+  return place?.span ?? { from: 0, to: 1 };
 }
 
 function storedText(shown: string, edits: readonly { readonly span: Span; readonly text: string }[]): string {

@@ -3,7 +3,7 @@ import type { FunctionName } from './functions.ts';
 
 /**
  * A text made plain for the parser: every operand is a name `t0`, `t1`, …, every function `f0`, `f1`, …, and every
- * product is written out, so that the parser's own habits of reading (calls, units, run-together names) never act.
+ * product is written out, so that nothing is left to guess.
  */
 export interface Pieces {
   readonly text: string;

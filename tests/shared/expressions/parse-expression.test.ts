@@ -318,7 +318,7 @@ describe('bad input', () => {
 
   test.each([
     ['a ? b', 'This cannot be read as a formula. A choice is written condition ? value : other value.'],
-    ['a : b', 'This cannot be read as a formula.'],
+    ['a : b', 'This cannot be read as a formula. A choice is written condition ? value : other value.'],
   ])('%s: is refused', (text, sentence) => {
     expect(faultOf(text, known).sentence).toBe(sentence);
   });
