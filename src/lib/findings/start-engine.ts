@@ -1,4 +1,5 @@
 import { wrap } from 'comlink';
+import workerAddress from 'virtual:findings-worker';
 import type { Findings } from '#shared/evidence/findings.ts';
 import type { FindingsEngine } from './findings-engine.ts';
 
@@ -13,7 +14,7 @@ export async function startEngine(): Promise<RunningEngine> {
     const { createFindingsEngine } = await import('./findings-engine.ts');
     return { engine: createFindingsEngine(), stop: () => undefined };
   }
-  const worker = new Worker(new URL('../../workers/findings.worker.ts', import.meta.url), { type: 'module' });
+  const worker = new Worker(workerAddress, { type: 'module' });
   const remote = wrap<FindingsEngine>(worker);
   // A worker that cannot start answers nothing at all: its error event is the only sign.
   const broken = new Promise<never>((_, reject) => {
