@@ -1,9 +1,9 @@
-import { Dialog as Radix } from 'radix-ui';
-import type { ReactNode } from 'react';
-import { Button } from './button.tsx';
-import { Scrim } from './scrim.tsx';
+import { lazy, Suspense, type ReactNode } from 'react';
 
-interface SheetProps {
+/** Comes when a sheet is first opened: most screens never open one. */
+const DrawnSheet = lazy(async () => ({ default: (await import('./drawn-sheet.tsx')).DrawnSheet }));
+
+export interface SheetProps {
   readonly open: boolean;
   readonly onClose: () => void;
   readonly title: string;
@@ -13,28 +13,11 @@ interface SheetProps {
 }
 
 /** From the bottom of a small screen: the stations, a provenance card. */
-export function Sheet({ open, onClose, title, isTitleHidden = false, children }: SheetProps) {
+export function Sheet({ open, ...drawn }: SheetProps) {
+  if (!open) return null;
   return (
-    <Radix.Root open={open} onOpenChange={(isOpen) => !isOpen && onClose()}>
-      <Radix.Portal>
-        <Scrim />
-        <Radix.Content
-          aria-describedby={undefined}
-          className="slides-up fixed inset-x-0 bottom-0 z-20 max-h-[85dvh] overflow-y-auto rounded-t-lg bg-paper px-5 pt-4 pb-[max(20px,env(safe-area-inset-bottom))] shadow-card"
-        >
-          <div className="flex items-center justify-between gap-4">
-            <Radix.Title className={isTitleHidden ? 'sr-only' : 'font-report text-[21px]/7 font-medium'}>
-              {title}
-            </Radix.Title>
-            <Radix.Close asChild>
-              <Button kind="plain" className="-mr-2 ml-auto min-h-12">
-                Close
-              </Button>
-            </Radix.Close>
-          </div>
-          {children}
-        </Radix.Content>
-      </Radix.Portal>
-    </Radix.Root>
+    <Suspense fallback={null}>
+      <DrawnSheet {...drawn} />
+    </Suspense>
   );
 }

@@ -1,56 +1,29 @@
-import { Dialog } from 'radix-ui';
-import type { ReactNode } from 'react';
-import { Word } from '#src/components/word.tsx';
-import { STATIONS } from '#src/lib/paths.ts';
-import { digitKeys } from '#src/lib/preferences/digit-keys.ts';
-import { useStore } from '#src/lib/store/use-store.ts';
+import { lazy, Suspense, useRef, useState } from 'react';
 
-const KEYS: readonly (readonly [key: ReactNode, does: string])[] = [
-  [`1 to ${STATIONS.length}`, 'the stations, in their order'],
-  ['0', 'the Season'],
-  ['F6', 'from the page to the entry bar or the sill; with Shift, back'],
-  [
-    <>
-      <i>R</i> ±
-    </>,
-    'ties a value; +- will do for ±',
-  ],
-  ['arrows', 'choose on the sill and in lists'],
-  ['Enter', 'puts in, opens a number; on the trials, goes to the entry bar'],
-  ['Escape', 'closes what lies on top'],
-];
+/** Comes when the word is first pressed. */
+const DrawnKeysSlip = lazy(async () => ({ default: (await import('./drawn-keys-slip.tsx')).DrawnKeysSlip }));
 
 /** The word Keys, and the slip it opens under the top line. */
 export function KeysSlip({ className }: { readonly className?: string }) {
-  const areDigitsOn = useStore(digitKeys) === 'on';
+  const [isOpen, setOpen] = useState(false);
+  const word = useRef<HTMLButtonElement>(null);
   return (
-    <Dialog.Root modal={false}>
-      <Dialog.Trigger className={className}>Keys</Dialog.Trigger>
-      <Dialog.Portal>
-        <Dialog.Content
-          aria-describedby={undefined}
-          className="rises fixed top-[60px] right-6 z-[7] max-h-[calc(100dvh-80px)] w-[min(392px,calc(100vw-48px))] overflow-y-auto rounded-b-md bg-paper px-[26px] py-5 shadow-card"
-        >
-          <Dialog.Title className="mb-1.5 font-report text-[22px]/7 font-medium">Keys</Dialog.Title>
-          <dl className="grid grid-cols-[104px_1fr] border-t-[1.25px] border-ink text-sm">
-            {KEYS.map(([key, does]) => (
-              <div key={does} className="contents">
-                <dt className="border-b border-hair py-2 font-report text-[17px]/5 font-medium">{key}</dt>
-                <dd className="border-b border-hair py-2 text-ink-2">{does}</dd>
-              </div>
-            ))}
-          </dl>
-          <p className="mt-3 font-report text-base text-ink-2">
-            The digits act only when no field has the focus. They are {areDigitsOn ? 'on' : 'off'}.
-            <Word
-              className="ml-1.5 font-ui text-sm"
-              onClick={() => digitKeys.set(areDigitsOn ? 'off' : 'on')}
-            >
-              Switch {areDigitsOn ? 'off' : 'on'}
-            </Word>
-          </p>
-        </Dialog.Content>
-      </Dialog.Portal>
-    </Dialog.Root>
+    <>
+      <button
+        ref={word}
+        type="button"
+        aria-haspopup="dialog"
+        aria-expanded={isOpen}
+        className={className}
+        onClick={() => setOpen(!isOpen)}
+      >
+        Keys
+      </button>
+      {isOpen && (
+        <Suspense fallback={null}>
+          <DrawnKeysSlip word={word} onClose={() => setOpen(false)} />
+        </Suspense>
+      )}
+    </>
   );
 }

@@ -1,11 +1,10 @@
-import './provenance.css';
-import { useEffect, useRef, type CSSProperties } from 'react';
-import { provenanceOf } from '#shared/report/provenance.ts';
-import { Sheet } from '#src/components/sheet.tsx';
-import { classNames } from '#src/lib/class-names.ts';
-import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
-import { useMedia } from '#src/lib/use-media.ts';
-import { ProvenanceBody, type ProvenanceBodyProps } from './provenance-body.tsx';
+import { lazy, Suspense, type CSSProperties } from 'react';
+import type { ProvenanceBodyProps } from './provenance-body.tsx';
+
+/** Comes when the first number is pressed. */
+const DrawnProvenanceCard = lazy(async () => ({
+  default: (await import('./drawn-provenance-card.tsx')).DrawnProvenanceCard,
+}));
 
 export interface ProvenanceCardProps extends ProvenanceBodyProps {
   readonly onClose: () => void;
@@ -19,66 +18,11 @@ export interface ProvenanceCardProps extends ProvenanceBodyProps {
   readonly onPointerLeave?: () => void;
 }
 
-/** The width from which there is a margin to stand in. */
-const ROOM = '(min-width: 1100px)';
-
 /** Where a number comes from, beside it. Escape closes it; whoever opened it takes the focus back. */
-export function ProvenanceCard({
-  onClose,
-  place,
-  notch,
-  takesFocus = false,
-  onPointerEnter,
-  onPointerLeave,
-  ...body
-}: ProvenanceCardProps) {
-  const hasRoom = useMedia(ROOM);
-  const card = useRef<HTMLElement>(null);
-  const { evidence, findings } = useFindingsSnapshot();
-  const { shown } = provenanceOf(body.reference, evidence, findings, body.unit ?? null);
-  const title = `Where ${shown.value} comes from`;
-  useEffect(() => {
-    if (hasRoom && takesFocus) card.current?.focus({ preventScroll: true });
-  }, [hasRoom, takesFocus, body.reference]);
-  useEscape(hasRoom, onClose);
-  if (!hasRoom) {
-    return (
-      <Sheet open onClose={onClose} title={title} isTitleHidden>
-        <ProvenanceBody {...body} />
-      </Sheet>
-    );
-  }
+export function ProvenanceCard(props: ProvenanceCardProps) {
   return (
-    <aside
-      ref={card}
-      role="dialog"
-      aria-label={title}
-      tabIndex={-1}
-      data-region="margin"
-      data-region-start
-      style={place}
-      onPointerEnter={onPointerEnter}
-      onPointerLeave={onPointerLeave}
-      className={classNames(
-        'rises absolute z-[5] w-[372px] rounded-sm bg-paper px-5 pt-4 pb-3.5 shadow-card outline-offset-0',
-        notch === 'left' && 'card-notch-left',
-        notch === 'right' && 'card-notch-right',
-      )}
-    >
-      <ProvenanceBody {...body} />
-    </aside>
+    <Suspense fallback={null}>
+      <DrawnProvenanceCard {...props} />
+    </Suspense>
   );
-}
-
-function useEscape(isOn: boolean, onClose: () => void): void {
-  useEffect(() => {
-    if (!isOn) return undefined;
-    const onKey = (event: KeyboardEvent) => {
-      if (event.key !== 'Escape' || event.defaultPrevented) return;
-      event.preventDefault();
-      onClose();
-    };
-    window.addEventListener('keydown', onKey);
-    return () => window.removeEventListener('keydown', onKey);
-  }, [isOn, onClose]);
 }

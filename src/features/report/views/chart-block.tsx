@@ -1,10 +1,14 @@
 import { NodeViewWrapper, type NodeViewProps } from '@tiptap/react';
+import { lazy, Suspense } from 'react';
 import type { ChartAttributes } from '#shared/report/schema/chart-node.ts';
-import { ComparisonChartView } from '#src/components/charts/comparison-chart-view.tsx';
 import { Notice } from '#src/components/notice.tsx';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
 import { useReportParts } from '../components/report-context.ts';
 import { Caption } from './caption.tsx';
+
+const ComparisonChartView = lazy(async () => ({
+  default: (await import('#src/components/charts/comparison-chart-view.tsx')).ComparisonChartView,
+}));
 
 /** A chart of the evidence, drawn anew whenever its trials change. */
 export function ChartBlockView({ node, editor, updateAttributes, selected }: NodeViewProps) {
@@ -23,7 +27,9 @@ export function ChartBlockView({ node, editor, updateAttributes, selected }: Nod
         ) : finding.fault ? (
           <Notice title="This chart cannot be drawn.">{finding.fault.sentence}</Notice>
         ) : (
-          <ComparisonChartView chart={chart} finding={finding} onOpenPoint={openReference} />
+          <Suspense fallback={<div className="aspect-[2/1]" />}>
+            <ComparisonChartView chart={chart} finding={finding} onOpenPoint={openReference} />
+          </Suspense>
         )}
       </div>
       <Caption
