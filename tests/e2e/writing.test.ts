@@ -120,6 +120,8 @@ describe('the report', () => {
 
   test('as an advisor: it is read, and cannot be typed into', async () => {
     const odile = await atReport(DEMO_PEOPLE.advisor);
+    // The chart's own words come with the chart.
+    await odile.getByRole('button', { name: 'See as table' }).waitFor();
     const before = await text(odile).textContent();
 
     await section(odile, 'Phenomenon').locator('p').first().click();
