@@ -4,6 +4,7 @@ import type { ServerDeps } from './deps.ts';
 import { notFound } from './errors/refusals.ts';
 import { problemJson } from './errors/problem-json.ts';
 import { mountAccount } from './features/account/routes.ts';
+import { mountEditions } from './features/editions/routes.ts';
 import { mountEvidence } from './features/evidence/routes.ts';
 import { mountExports } from './features/exports/routes.ts';
 import { mountFiles } from './features/files/routes.ts';
@@ -44,6 +45,7 @@ export function createApp(deps: ServerDeps): Express {
   mountReport(app, deps);
   mountFiles(app, deps);
   mountExports(app, deps);
+  mountEditions(app, deps);
 
   app.use('/api', () => {
     throw notFound();

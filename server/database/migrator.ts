@@ -5,9 +5,10 @@ import { people } from './migrations/0001-people.ts';
 import { problems } from './migrations/0002-problems.ts';
 import { audit } from './migrations/0003-audit.ts';
 import { reports } from './migrations/0004-reports.ts';
+import { editions } from './migrations/0005-editions.ts';
 
 /** In order. A table of imports rather than a folder that is read, so that the bundled server has them too. */
-const MIGRATIONS: readonly Migration[] = [people, problems, audit, reports];
+const MIGRATIONS: readonly Migration[] = [people, problems, audit, reports, editions];
 
 /** Brings the database up (or back down) one named step at a time, each in its own transaction. */
 export function createMigrator(database: Database) {

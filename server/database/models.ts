@@ -1,6 +1,7 @@
 /** Every table as a Sequelize model, bound to one connection; and what they are to one another. */
 import type { Sequelize } from 'sequelize';
 import { defineUsers } from '#server/features/account/model.ts';
+import { defineEditions } from '#server/features/editions/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
 import { defineFiles } from '#server/features/files/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
@@ -26,5 +27,6 @@ export function defineModels(sequelize: Sequelize) {
     reportDocs: defineReportDocs(sequelize),
     files: defineFiles(sequelize),
     reportUpdates: defineReportUpdates(sequelize),
+    editions: defineEditions(sequelize),
   };
 }

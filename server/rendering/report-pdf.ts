@@ -1,4 +1,4 @@
-import type { Problem, Team } from '#shared/contracts/teams.ts';
+import type { Person, Problem, Team } from '#shared/contracts/teams.ts';
 import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { Findings } from '#shared/evidence/findings.ts';
 import { blockNumbers } from '#shared/report/block-numbers.ts';
@@ -15,17 +15,19 @@ import { drawSection } from './report/section.ts';
 import { drawSourcesList } from './report/sources-list.ts';
 import { drawTitleBlock } from './report/title-block.ts';
 
+type Named = Pick<Person, 'name' | 'role'>;
+
 /** Everything a report is printed from; nothing else reaches the file. */
 export interface ReportPdfInput {
-  readonly problem: Pick<Problem, 'number' | 'title' | 'statement' | 'owners'>;
-  readonly team: Pick<Team, 'name' | 'university' | 'people' | 'isDemo'>;
+  readonly problem: Pick<Problem, 'number' | 'title' | 'statement'> & { readonly owners: readonly Named[] };
+  readonly team: Pick<Team, 'name' | 'university' | 'isDemo'> & { readonly people: readonly Named[] };
   readonly document: ReportDocument;
   readonly evidence: Evidence;
   readonly findings: Findings;
   /** JPEG bytes of the report's pictures by fingerprint. */
   readonly plates: ReadonlyMap<string, Uint8Array>;
-  /** True: "Draft" stands in the foot. */
-  readonly draft: boolean;
+  /** The edition that is printed, with its seal; null: "Draft" stands in the foot. */
+  readonly edition: { readonly n: number; readonly seal: string } | null;
   /** Moment written on the pages and into the file, ISO 8601. */
   readonly at: string;
 }
@@ -74,7 +76,8 @@ export async function renderReportPdf(input: ReportPdfInput, onProgress?: OnProg
   drawRunningParts(writer, context.flow.frame, {
     title: problem.title,
     team: `${team.name}, ${team.university}`,
-    foot: input.draft ? `Draft, ${printDate(at)}` : printDate(at),
+    foot: input.edition === null ? `Draft, ${printDate(at)}` : `Edition ${input.edition.n}, ${printDate(at)}`,
+    edition: input.edition,
   });
   const pages = writer.pageCount;
   return { bytes: await writer.finish(), pages };

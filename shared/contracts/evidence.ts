@@ -28,7 +28,7 @@ export const getEvidence = endpoint({
 
 /**
  * Every number, curve and verdict, computed by the server with the code that the screens use; for scripts. Maps come as
- * objects by key, columns as lists; what is not finite is null.
+ * objects by key, columns as lists; what is not finite is { notFinite: "Infinity" }, so that null means not known.
  */
 export const getFindings = endpoint({
   method: 'GET',

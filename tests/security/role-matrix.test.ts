@@ -52,6 +52,10 @@ const MATRIX: Readonly<Record<string, string>> = {
   [`GET ${P}/exports/:export`]: 'team reads',
   [`DELETE ${P}/exports/:export`]: 'team reads',
   [`GET ${P}/exports/:export/file`]: 'team reads',
+  [`GET ${P}/editions`]: 'team reads',
+  [`POST ${P}/editions`]: 'captain only',
+  [`GET ${P}/editions/:n`]: 'team reads',
+  [`GET ${P}/editions/:n/report.pdf`]: 'team reads',
 };
 
 let app: TestServer;

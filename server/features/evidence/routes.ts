@@ -9,7 +9,7 @@ import type { ServerDeps } from '#server/deps.ts';
 import { getIfMatch } from '#server/middleware/if-match.ts';
 import { mountProblem } from '#server/middleware/mount.ts';
 import { createDefinition, removeDefinition, replaceDefinition } from './definitions.ts';
-import { findingsToJson } from './findings-json.ts';
+import { findingsToJson } from '#shared/evidence/findings-json.ts';
 import { DEFINITION_TABLES } from './model.ts';
 import { getEvidence } from './service.ts';
 

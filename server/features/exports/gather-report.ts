@@ -1,6 +1,6 @@
-import type { ReportDocument, ReportNode } from '#shared/report/schema/report-node.ts';
+import { plateFingerprints } from '#shared/report/plate-fingerprints.ts';
 import type { ServerDeps } from '#server/deps.ts';
-import { findPicture } from '#server/features/files/service.ts';
+import { readPictures } from '#server/features/files/service.ts';
 import { getEvidence } from '#server/features/evidence/service.ts';
 import { getProblem } from '#server/features/problems/service.ts';
 import { documentOf } from '#server/features/report/service.ts';
@@ -22,32 +22,8 @@ export async function gatherReport(deps: ServerDeps, place: ProblemPlace): Promi
     document,
     evidence,
     findings,
-    plates: await readPlates(deps, place, document),
-    draft: true,
+    plates: await readPictures(deps, place.problem.id, plateFingerprints(document)),
+    edition: null,
     at: deps.now().toISOString(),
   };
-}
-
-async function readPlates(
-  deps: ServerDeps,
-  place: ProblemPlace,
-  document: ReportDocument,
-): Promise<Map<string, Uint8Array>> {
-  const plates = new Map<string, Uint8Array>();
-  for (const sha of plateFingerprints(document)) {
-    const bytes = await findPicture(deps, place.problem.id, sha);
-    if (bytes) plates.set(sha, bytes);
-  }
-  return plates;
-}
-
-/** Fingerprints of the report's pictures, each once. */
-function plateFingerprints(document: ReportDocument): string[] {
-  const found = new Set<string>();
-  const visit = (node: ReportNode): void => {
-    if (node.type === 'plate') found.add(node.attrs.sha);
-    if ('content' in node) (node.content ?? []).forEach(visit);
-  };
-  visit(document);
-  return [...found];
 }

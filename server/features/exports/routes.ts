@@ -1,4 +1,4 @@
-import type { Express, Response } from 'express';
+import type { Express } from 'express';
 import {
   cancelExport as cancelExportEndpoint,
   getExport,
@@ -8,15 +8,9 @@ import {
 } from '#shared/contracts/report.ts';
 import type { ServerDeps } from '#server/deps.ts';
 import { mountProblem } from '#server/middleware/mount.ts';
+import { sendPdf } from '#server/middleware/send-pdf.ts';
 import { ExportJobs } from './export-jobs.ts';
-import {
-  cancelExport,
-  getExportFile,
-  getExportState,
-  printReport,
-  startExport,
-  type PdfFile,
-} from './service.ts';
+import { cancelExport, getExportFile, getExportState, printReport, startExport } from './service.ts';
 
 export function mountExports(app: Express, deps: ServerDeps): void {
   const jobs = new ExportJobs();
@@ -40,11 +34,4 @@ export function mountExports(app: Express, deps: ServerDeps): void {
   mountProblem(app, deps.database, getReportPdf, 'read', async ({ place, response }) =>
     sendPdf(response, await printReport(deps, place)),
   );
-}
-
-function sendPdf(response: Response, file: PdfFile): void {
-  response.setHeader('content-type', 'application/pdf');
-  response.setHeader('content-disposition', `attachment; filename="${file.name}"`);
-  response.setHeader('x-content-type-options', 'nosniff');
-  response.status(200).end(Buffer.from(file.bytes));
 }

@@ -6,13 +6,9 @@ import { notFound } from '#server/errors/refusals.ts';
 import type { ServerDeps } from '#server/deps.ts';
 import type { ProblemPlace } from '#server/features/teams/service.ts';
 import type { Actor } from '#server/middleware/actor.ts';
+import { pdfFileName, type PdfFile } from '#server/rendering/pdf-file.ts';
 import { toExportState, type ExportJob, type ExportJobs } from './export-jobs.ts';
 import { gatherReport } from './gather-report.ts';
-
-export interface PdfFile {
-  readonly name: string;
-  readonly bytes: Uint8Array;
-}
 
 const MOST_AT_ONCE = 2;
 
@@ -24,7 +20,7 @@ export async function printReport(
 ): Promise<PdfFile> {
   const input = await gatherReport(deps, place);
   const { bytes } = await deps.renderer.render(input, options);
-  return { name: fileName(input.problem.title), bytes };
+  return { name: pdfFileName(input.problem.title, 'report'), bytes };
 }
 
 /** Starts an export and answers at once; 429 `too-many-exports` while two of the same person are under way. */
@@ -103,14 +99,4 @@ export function getExportFile(jobs: ExportJobs, place: ProblemPlace, actor: Acto
     throw new AppError(409, 'not-done', 'The file is still being made. Ask again in a moment.');
   }
   throw new AppError(409, 'not-done', job.sentence ?? 'This export was stopped. Start it again.');
-}
-
-/** "leaning-spout-report.pdf". */
-function fileName(title: string): string {
-  const name = title
-    .normalize('NFKD')
-    .toLowerCase()
-    .replace(/[^a-z0-9]+/gu, '-')
-    .replace(/^-|-$/gu, '');
-  return `${name || 'problem'}-report.pdf`;
 }

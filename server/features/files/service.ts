@@ -51,6 +51,33 @@ export async function findPicture(deps: FileDeps, problemId: string, sha: string
   return row ? readFile(placeOf(deps, sha)) : null;
 }
 
+/** The bytes of those of these pictures that the problem has, by fingerprint. */
+export async function readPictures(
+  deps: FileDeps,
+  problemId: string,
+  shas: readonly string[],
+): Promise<Map<string, Uint8Array>> {
+  const pictures = new Map<string, Uint8Array>();
+  for (const sha of shas) {
+    const bytes = await findPicture(deps, problemId, sha);
+    if (bytes) pictures.set(sha, bytes);
+  }
+  return pictures;
+}
+
+/** What is known of those of these pictures that the problem has, in the order of their fingerprints. */
+export async function listPictures(
+  database: Database,
+  problemId: string,
+  shas: readonly string[],
+): Promise<PlateFile[]> {
+  const rows = await database.models.files.findAll({
+    where: { problemId, sha: [...shas] },
+    order: [['sha', 'ASC']],
+  });
+  return rows.map(toPlateFile);
+}
+
 function placeOf({ environment }: FileDeps, sha: string): string {
   return path.join(environment.dataFolder, 'files', sha.slice(0, 2), `${sha}.jpg`);
 }

@@ -30,7 +30,7 @@ export function demoInput(changes: Partial<ReportPdfInput> = {}): ReportPdfInput
     evidence,
     findings: evaluate(evidence),
     plates: new Map(),
-    draft: true,
+    edition: null,
     at: '2026-03-03T14:32:00.000Z',
     ...changes,
   };
