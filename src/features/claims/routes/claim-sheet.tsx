@@ -5,7 +5,7 @@ import { SentenceText } from '#src/components/sentence-text.tsx';
 import { VerdictMark } from '#src/components/verdict.tsx';
 import { Word, WordLink } from '#src/components/word.tsx';
 import { dayAndMonth } from '#src/lib/dates/say-date.ts';
-import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
+import { useEvidence, useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
 import { paths } from '#src/lib/paths.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
 import { sayList } from '#src/lib/say/say-list.ts';
@@ -13,6 +13,7 @@ import { sayNumber } from '#src/lib/say/say-number.ts';
 import { useStationCup } from '#src/lib/station-cup.ts';
 import { ClaimForm } from '../components/claim-form.tsx';
 import { ClaimScale } from '../components/claim-scale.tsx';
+import { turningSentence } from '../view/turning-sentence.ts';
 
 /** Every claim with what it rests on, its place between its margins, and its verdict. */
 export function ClaimSheet() {
@@ -86,6 +87,10 @@ export function ClaimSheet() {
           </p>
         )}
       </section>
+      <p className="mt-4 text-sm text-ink-2 max-sm:px-4">
+        A test and its margin are set before the trials. Changing them afterwards is allowed, and the day it
+        was done is shown.
+      </p>
     </main>
   );
 }
@@ -99,12 +104,15 @@ function ClaimRow({
   readonly finding: ClaimFinding | undefined;
   readonly onChange: (() => void) | null;
 }) {
+  const { settings } = useEvidence();
+  const turning = finding ? turningSentence(claim, finding, settings.rounding) : null;
   return (
     <div className="grid grid-cols-[70px_1fr_290px_110px] items-center gap-y-2 py-5 max-[900px]:grid-cols-[40px_minmax(0,1fr)]">
       <span className="self-start font-report text-xl text-ink-3">{claim.n}</span>
       <div className="pr-6">
         <p className="font-report text-lg font-medium">{claim.text}</p>
         <p className="text-sm text-ink-2">{finding && <SentenceText text={finding.sentence} />}</p>
+        {turning && <p className="font-report text-[15px]/[22px] text-ink-2">{turning}</p>}
         <p className="mt-1 flex gap-4 text-xs text-ink-3">
           {claim.test ? `Test set on ${dayAndMonth(new Date(claim.declaredAt))}.` : 'No test is chosen yet.'}
           {onChange && (

@@ -75,7 +75,7 @@ export function ComparisonPanel({
             />
           </p>
         </div>
-        <div className="ml-auto flex gap-4.5 text-xs max-sm:ml-0">
+        <div className="ml-auto flex flex-wrap gap-x-4.5 gap-y-1 text-xs max-sm:ml-0">
           <MeasuredKey />
           <PredictedKey />
           <DisagreementKey words={`beyond ${evidence.settings.k} u`} />

@@ -18,7 +18,7 @@ export function EquationList({ model }: { readonly model: Model }) {
       <dl className="mt-3.5 border-y border-hair py-3 text-[16.5px]">
         {views.map(({ quantity, latex, typed, fault }, index) => (
           <div key={model.equations[index]?.defines} className="flex min-h-10 flex-wrap items-center gap-y-1">
-            <dt className="w-26 flex-none text-xs text-ink-3">
+            <dt className="w-26 flex-none pr-3 text-xs text-ink-3">
               {quantity?.name ?? 'a quantity that is gone'}
             </dt>
             <dd className="min-w-0 flex-1">

@@ -1,4 +1,4 @@
-import type { Evidence, Quantity } from '#shared/evidence/evidence.ts';
+import type { Evidence, Quantity, Reading } from '#shared/evidence/evidence.ts';
 import { findSource } from '#shared/evidence/find-source.ts';
 import type { Findings, Scalar } from '#shared/evidence/findings.ts';
 import { uncertaintyBudget } from '#shared/uncertainty/uncertainty-budget.ts';
@@ -10,6 +10,8 @@ export interface BudgetRow {
   readonly quantity: Quantity | null;
   /** "fit to series A", "steel rule, common to all". */
   readonly words: string;
+  /** What was held fixed, where the source is a setting of a whole series. */
+  readonly held: Reading | null;
   readonly share: number;
 }
 
@@ -21,7 +23,13 @@ export function budgetRows(scalar: Scalar, evidence: Evidence, findings: Finding
     const quantity = quantityOfSource(source, evidence);
     const key = `${quantity?.id ?? ''} ${words}`;
     const before = rows.get(key);
-    rows.set(key, { key, quantity, words, share: share + (before?.share ?? 0) });
+    rows.set(key, {
+      key,
+      quantity,
+      words,
+      held: heldReading(source, evidence),
+      share: share + (before?.share ?? 0),
+    });
   }
   return [...rows.values()].sort((a, b) => b.share - a.share);
 }
@@ -46,4 +54,10 @@ function quantityOfSource(source: string, evidence: Evidence): Quantity | null {
     default:
       return null;
   }
+}
+
+function heldReading(source: string, evidence: Evidence): Reading | null {
+  const [kind, series, quantity = ''] = source.split(':');
+  if (kind !== 'held') return null;
+  return evidence.series.find(({ id }) => id === series)?.held[quantity] ?? null;
 }

@@ -20,7 +20,7 @@ export function TasksField({ tasks, onChange, errors = [], isReadOnly = false, h
     <fieldset className="min-w-0">
       <legend className="text-xs font-[550] text-ink-2">What it asks</legend>
       <p className="mt-1 mb-3 text-xs text-ink-3">{hint}</p>
-      <ol className="grid gap-3">
+      <ol className="grid grid-cols-[minmax(0,1fr)] gap-3">
         {tasks.map(({ id, text }, index) => (
           <li key={id} className="flex items-start gap-3">
             <Field

@@ -3,6 +3,7 @@ import type { Quantity } from '#shared/evidence/evidence.ts';
 import { Field } from '#src/components/field.tsx';
 import { QuantitySymbol } from '#src/components/quantity-symbol.tsx';
 import { UnitText } from '#src/components/unit-text.tsx';
+import { shortName } from '../view/short-name.ts';
 
 interface EntryFieldProps {
   readonly quantity: Quantity;
@@ -70,10 +71,4 @@ export function EntryField({
       )}
     </>
   );
-}
-
-/** "Range" of "range on the tray": the label stands over a narrow field. */
-function shortName(name: string): string {
-  const first = name.split(' ')[0] ?? name;
-  return `${first.charAt(0).toUpperCase()}${first.slice(1)}`;
 }

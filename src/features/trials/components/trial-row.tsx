@@ -112,8 +112,8 @@ function ReasonCell({ line, span }: { readonly line: TrialLine; readonly span: n
   const { mayWrite } = useProblem();
   const { bringBack } = useTrialActions();
   return (
-    <td colSpan={span} className="p-0 pr-6">
-      <span className="ml-auto flex w-fit max-w-full items-center gap-2.5 rounded-sm border border-rule bg-paper px-2 py-px text-xs text-ink">
+    <td colSpan={span} className="relative p-0">
+      <span className="absolute top-1/2 right-6 z-[1] flex w-max max-w-[410px] -translate-y-1/2 items-center gap-2.5 rounded-sm border border-rule bg-paper px-2 py-px text-xs text-ink">
         <span className="truncate" title={line.trial.excluded?.reason}>
           {line.trial.excluded?.reason}
         </span>

@@ -4,6 +4,7 @@ import { useLayoutEffect, useMemo, useRef, useState } from 'react';
 import { QuantitySymbol } from '#src/components/quantity-symbol.tsx';
 import { UnitText } from '#src/components/unit-text.tsx';
 import type { Quantity } from '#shared/evidence/evidence.ts';
+import { shortName } from '../view/short-name.ts';
 import type { SharedScale } from '../view/shared-scale.ts';
 import type { GroupLines, SeriesView, TrialLine } from '../view/series-view.ts';
 import { StripHead } from './reading-strip.tsx';
@@ -162,8 +163,8 @@ function QuantityHead({
 }) {
   const { name, symbol, unit } = quantity;
   return (
-    <span title={name}>
-      <QuantitySymbol symbol={symbol} />
+    <span title={name} className="whitespace-nowrap">
+      {shortName(name)} <QuantitySymbol symbol={symbol} />
       {withUnit && unit !== '1' && (
         <>
           {' / '}

@@ -1,23 +1,20 @@
-import type { FieldErrors, UseFormRegister } from 'react-hook-form';
-import { statisticSchema } from '#shared/evidence/evidence.ts';
+import type { Control, FieldErrors, UseFormRegister } from 'react-hook-form';
 import { Field } from '#src/components/field.tsx';
 import { Select } from '#src/components/select.tsx';
 import { useEvidence } from '#src/lib/evidence/use-evidence.ts';
 import type { Origin, QuantityDraft } from './quantity-draft.ts';
+import { SummaryFields } from './summary-fields.tsx';
 
 interface OriginFieldsProps {
   readonly origin: Origin;
+  readonly control: Control<QuantityDraft>;
   readonly register: UseFormRegister<QuantityDraft>;
   readonly errors: FieldErrors<QuantityDraft>;
 }
 
-const STATISTICS = statisticSchema.options
-  .filter((stat) => stat !== 'slope')
-  .map((value) => ({ value, words: value }));
-
 /** What else must be said, by how the quantity comes by its value. */
-export function OriginFields({ origin, register, errors }: OriginFieldsProps) {
-  const { comparisons, models, quantities, series } = useEvidence();
+export function OriginFields({ origin, control, register, errors }: OriginFieldsProps) {
+  const { comparisons, models } = useEvidence();
   switch (origin) {
     case 'recorded':
       return <InstrumentSelect register={register} />;
@@ -73,32 +70,7 @@ export function OriginFields({ origin, register, errors }: OriginFieldsProps) {
         />
       );
     case 'summary':
-      return (
-        <>
-          <Select label="Statistic" options={STATISTICS} {...register('stat')} />
-          <Select
-            label="Of"
-            options={[
-              none,
-              ...quantities
-                .filter(({ def }) => def.origin === 'recorded' || def.origin === 'derived')
-                .map(({ id, name }) => ({ value: id, words: name })),
-            ]}
-            error={errors.from?.message}
-            {...register('from')}
-          />
-          <Select
-            label="Over the series"
-            frameClassName="col-span-2"
-            options={[
-              none,
-              ...series.map(({ id, letter, name }) => ({ value: id, words: `${letter}, ${name}` })),
-            ]}
-            error={errors.series?.message}
-            {...register('series')}
-          />
-        </>
-      );
+      return <SummaryFields control={control} register={register} errors={errors} />;
   }
 }
 

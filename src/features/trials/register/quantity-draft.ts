@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import type { quantityBody } from '#shared/contracts/evidence.ts';
-import type { Evidence, Quantity, Statistic } from '#shared/evidence/evidence.ts';
-import { statisticSchema, uncertaintyPartSchema } from '#shared/evidence/evidence.ts';
+import type { Evidence, Quantity, Selection, Statistic } from '#shared/evidence/evidence.ts';
+import { selectionSchema, statisticSchema, uncertaintyPartSchema } from '#shared/evidence/evidence.ts';
 import { parseExpression } from '#shared/expressions/parse-expression.ts';
 import { toShown } from '#shared/expressions/stored-form.ts';
 import { sameSymbol, symbolFault } from '#shared/formatting/symbol.ts';
@@ -38,6 +38,12 @@ export interface QuantityDraft {
   /** summary: which statistic, and over which series. */
   stat: Statistic;
   series: string;
+  /** slope: the quantity on the horizontal axis. */
+  against: string;
+  /** mean, median: what the scatter is taken from. */
+  scatter: 'group' | 'pooled';
+  /** summary: the trials as chosen before; kept while the series stays. */
+  selection: Selection | null;
 }
 
 export type QuantityBody = z.infer<typeof quantityBody>;
@@ -64,6 +70,9 @@ export function emptyDraft(): QuantityDraft {
     from: '',
     stat: 'mean',
     series: '',
+    against: '',
+    scatter: 'group',
+    selection: null,
   };
 }
 
@@ -85,8 +94,13 @@ export function draftOf(quantity: Quantity, evidence: Evidence): QuantityDraft {
     parts: def.origin === 'constant' ? [...def.parts] : [],
     expr: def.origin === 'derived' ? toShown(def.expr, evidence.quantities) : '',
     from: sourceOf(def),
-    stat: def.origin === 'summary' ? def.stat : 'mean',
-    series: def.origin === 'summary' ? (def.where.series[0] ?? '') : '',
+    ...(def.origin === 'summary' && {
+      stat: def.stat,
+      series: def.where.series[0] ?? '',
+      against: def.against ?? '',
+      scatter: def.scatter,
+      selection: def.where,
+    }),
   };
 }
 
@@ -120,6 +134,9 @@ export function quantityDraftSchema(evidence: Evidence, id: string | null) {
       from: z.string(),
       stat: statisticSchema,
       series: z.string(),
+      against: z.string(),
+      scatter: z.enum(['group', 'pooled']),
+      selection: selectionSchema.nullable(),
     })
     .superRefine((draft, context) => {
       const refuse = (field: keyof QuantityDraft, message: string | null | undefined) => {
@@ -136,11 +153,17 @@ export function quantityDraftSchema(evidence: Evidence, id: string | null) {
       if (draft.origin === 'summary') {
         refuse('from', draft.from === '' ? 'Choose the column.' : null);
         refuse('series', draft.series === '' ? 'Choose the series.' : null);
+        if (draft.stat === 'slope') refuse('against', againstFault(draft));
       }
       if (draft.status === 'published' && draft.source === '') {
         refuse('source', 'Say where the published value comes from.');
       }
     });
+}
+
+function againstFault({ against, from }: Pick<QuantityDraft, 'against' | 'from'>): string | null {
+  if (against === '') return 'Choose what the slope is taken against.';
+  return against === from ? 'A slope needs two different quantities. Choose another.' : null;
 }
 
 function clash(symbol: string, evidence: Evidence, id: string | null): string | null {
@@ -206,9 +229,13 @@ function definitionOf(draft: QuantityDraft, evidence: Evidence): QuantityBody['d
       return {
         origin: 'summary',
         of: draft.from,
+        ...(draft.stat === 'slope' && { against: draft.against }),
         stat: draft.stat,
-        where: { series: [draft.series], plusTrials: [], where: [] },
-        scatter: 'group',
+        where:
+          draft.selection?.series[0] === draft.series
+            ? draft.selection
+            : { series: [draft.series], plusTrials: [], where: [] },
+        scatter: draft.scatter,
       };
   }
 }

@@ -92,7 +92,7 @@ export function QuantityForm({ id, onClose }: { readonly id: string | null; read
             setValue('status', usualStatus(event.target.value as Origin)),
         })}
       />
-      <OriginFields origin={origin} register={register} errors={errors} />
+      <OriginFields origin={origin} control={form.control} register={register} errors={errors} />
       <Select label="Known as" options={STATUS_OPTIONS} {...register('status')} />
       <Field
         label="How, or from where"

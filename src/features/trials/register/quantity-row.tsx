@@ -38,7 +38,10 @@ export function QuantityRow({
       <span className="text-ink-2">
         {name}
         <span className="block text-2xs text-ink-3">
-          <SentenceText text={source || STATUS_WORDS[status]} />
+          <SentenceText
+            text={source || STATUS_WORDS[status]}
+            symbols={evidence.quantities.map((row) => row.symbol)}
+          />
         </span>
       </span>
     </>
@@ -48,14 +51,14 @@ export function QuantityRow({
       {onChange ? (
         <button
           type="button"
-          className="-mx-1 grid grid-cols-[44px_1fr] items-baseline rounded-sm px-1 text-left hover:bg-sill"
+          className="-mx-1 grid grid-cols-[50px_1fr] items-baseline rounded-sm px-1 text-left hover:bg-sill"
           aria-label={`Change ${name}, ${symbol}`}
           onClick={onChange}
         >
           {text}
         </button>
       ) : (
-        <span className="grid grid-cols-[44px_1fr] items-baseline">{text}</span>
+        <span className="grid grid-cols-[50px_1fr] items-baseline">{text}</span>
       )}
       <ValueText value={value} isMeasured={status === 'measured'} />
     </li>
