@@ -5,6 +5,7 @@ import { notFound } from './errors/refusals.ts';
 import { problemJson } from './errors/problem-json.ts';
 import { mountAccount } from './features/account/routes.ts';
 import { mountEditions } from './features/editions/routes.ts';
+import { mountCopies } from './features/copies/routes.ts';
 import { mountEvidence } from './features/evidence/routes.ts';
 import { mountExports } from './features/exports/routes.ts';
 import { mountFiles } from './features/files/routes.ts';
@@ -46,6 +47,7 @@ export function createApp(deps: ServerDeps): Express {
   mountFiles(app, deps);
   mountExports(app, deps);
   mountEditions(app, deps);
+  mountCopies(app, deps);
 
   app.use('/api', () => {
     throw notFound();

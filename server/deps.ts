@@ -5,6 +5,7 @@ import type { Database } from './database/database.ts';
 import type { Evaluation } from './evaluation/evaluation.ts';
 import type { EvidenceCache } from './features/evidence/service.ts';
 import type { EventHub } from './features/events/service.ts';
+import type { CopyPasses } from './features/copies/copy-passes.ts';
 import type { SessionLayer } from './features/session/session-layer.ts';
 import type { Csrf } from './middleware/csrf.ts';
 import type { Limits } from './middleware/rate-limits.ts';
@@ -20,6 +21,7 @@ export interface ServerDeps {
   readonly now: () => Date;
   readonly session: SessionLayer;
   readonly csrf: Csrf;
+  readonly copyPasses: CopyPasses;
   readonly limits: Limits;
   readonly sockets: OpenSockets;
   readonly events: EventHub;

@@ -18,6 +18,7 @@ import { createMigrator } from './database/migrator.ts';
 import { seedDemo } from './database/seeders/demo/seed-demo.ts';
 import type { ServerDeps } from './deps.ts';
 import { createEvaluation } from './evaluation/evaluation.ts';
+import { createCopyPasses } from './features/copies/copy-passes.ts';
 import { attachEventStream } from './features/events/event-stream.ts';
 import { EventHub } from './features/events/service.ts';
 import { createEvidenceCache } from './features/evidence/service.ts';
@@ -94,6 +95,7 @@ async function createDeps(
     now,
     session: createSessionLayer(database, secret, now),
     csrf: createCsrf(secret),
+    copyPasses: createCopyPasses(secret, now),
     limits: limits ?? DEFAULT_LIMITS,
     sockets: new OpenSockets(),
     events: new EventHub(),

@@ -6,9 +6,10 @@ import { problems } from './migrations/0002-problems.ts';
 import { audit } from './migrations/0003-audit.ts';
 import { reports } from './migrations/0004-reports.ts';
 import { editions } from './migrations/0005-editions.ts';
+import { copies } from './migrations/0006-copies.ts';
 
 /** In order. A table of imports rather than a folder that is read, so that the bundled server has them too. */
-const MIGRATIONS: readonly Migration[] = [people, problems, audit, reports, editions];
+const MIGRATIONS: readonly Migration[] = [people, problems, audit, reports, editions, copies];
 
 /** Brings the database up (or back down) one named step at a time, each in its own transaction. */
 export function createMigrator(database: Database) {

@@ -1,6 +1,12 @@
 /** Every table as a Sequelize model, bound to one connection; and what they are to one another. */
 import type { Sequelize } from 'sequelize';
 import { defineUsers } from '#server/features/account/model.ts';
+import {
+  defineCopies,
+  defineCopyQuestions,
+  defineCopyRooms,
+  defineCopyViews,
+} from '#server/features/copies/model.ts';
 import { defineEditions } from '#server/features/editions/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
 import { defineFiles } from '#server/features/files/model.ts';
@@ -28,5 +34,9 @@ export function defineModels(sequelize: Sequelize) {
     files: defineFiles(sequelize),
     reportUpdates: defineReportUpdates(sequelize),
     editions: defineEditions(sequelize),
+    copies: defineCopies(sequelize),
+    copyViews: defineCopyViews(sequelize),
+    copyRooms: defineCopyRooms(sequelize),
+    copyQuestions: defineCopyQuestions(sequelize),
   };
 }

@@ -37,8 +37,10 @@ export function createCsrf(secret: string): Csrf {
 
 /** A token that outlived its session means that the session ended: that is what the person must hear. */
 function refusal(request: Request): AppError {
-  const isSigningIn = request.baseUrl + request.path === '/api/session' && request.method === 'POST';
-  if (!request.user && !isSigningIn) return notSignedIn();
+  const path = request.baseUrl + request.path;
+  const isSigningIn = path === '/api/session' && request.method === 'POST';
+  const needsNoAccount = isSigningIn || path.startsWith('/api/copies/');
+  if (!request.user && !needsNoAccount) return notSignedIn();
   return new AppError(
     403,
     'csrf',

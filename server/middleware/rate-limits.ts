@@ -26,15 +26,25 @@ export function passphraseLimits(limits: Limits): RequestHandler[] {
   return [failureLimit(limits.minutes, limits.failuresPerAccount, (request) => request.user?.id ?? 'nobody')];
 }
 
+/** Slows down whoever tries one address of a lent copy after another, or guesses its passphrase. Reading does not count. */
+export function tokenLimit(limits: Limits): RequestHandler {
+  return failureLimit(limits.minutes, limits.failuresPerAddress, undefined, [404, 422]);
+}
+
 function failureLimit(
   minutes: number,
   limit: number,
   keyGenerator: ((request: Request) => string) | undefined,
+  /** Answers that count as failures; null: every refusal. */
+  failures: readonly number[] | null = null,
 ): RequestHandler {
   return rateLimit({
     windowMs: minutes * 60_000,
     limit,
     skipSuccessfulRequests: true,
+    ...(failures === null
+      ? {}
+      : { requestWasSuccessful: (_request, { statusCode }) => !failures.includes(statusCode) }),
     standardHeaders: 'draft-7',
     legacyHeaders: false,
     ...(keyGenerator ? { keyGenerator } : {}),

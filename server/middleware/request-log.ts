@@ -17,10 +17,15 @@ export function requestLog(logger: Logger): RequestHandler {
       req: (request: { id: unknown; method: string; url: string; originalUrl?: string }) => ({
         id: request.id,
         method: request.method,
-        path: (request.originalUrl ?? request.url).split('?')[0],
+        path: withoutToken((request.originalUrl ?? request.url).split('?')[0] ?? ''),
       }),
       res: (response: { statusCode: number }) => ({ status: response.statusCode }),
       err: (error: { type?: string }) => ({ type: error.type ?? 'Error' }),
     },
   });
+}
+
+/** The token in the address of a lent copy opens it: it is left out, what is asked of the copy stays. */
+function withoutToken(path: string): string {
+  return path.replace(/^(\/api\/copies\/)[^/]+/i, '$1…');
 }

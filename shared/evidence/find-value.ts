@@ -187,7 +187,8 @@ function countOf(
       (series === undefined || trial.series === series) &&
       (of === 'trials' || (trial.excluded === undefined) === (of === 'kept')),
   );
-  return figure(trials.length, '1', { kind: 'count', trials: trials.map(({ id }) => id) });
+  const counted = series === undefined ? findings.counts?.[of] : undefined;
+  return figure(counted ?? trials.length, '1', { kind: 'count', trials: trials.map(({ id }) => id) });
 }
 
 function difference(

@@ -233,4 +233,6 @@ export interface Findings {
   readonly comparisons: ReadonlyMap<string, ComparisonFinding>;
   readonly claims: ReadonlyMap<string, ClaimFinding>;
   readonly charts: ReadonlyMap<string, ChartFinding>;
+  /** Trials of all series together; set only where some of the series are not there (a lent copy). */
+  readonly counts?: Readonly<Record<'trials' | 'kept' | 'excluded', number>>;
 }

@@ -7,6 +7,8 @@ import { DEMO_PEOPLE } from '#server/database/seeders/demo/people.ts';
 import type { DemoPerson } from '#server/database/seeders/demo/people.ts';
 import { fitsPassphrase, hashPassphrase } from './passphrase.ts';
 
+export { fitsPassphrase, hashPassphrase } from './passphrase.ts';
+
 interface Person {
   readonly id: string;
   readonly name: string;
