@@ -14,6 +14,7 @@ import { drawRunningParts } from './report/running-parts.ts';
 import { drawSection } from './report/section.ts';
 import { drawSourcesList } from './report/sources-list.ts';
 import { drawTitleBlock } from './report/title-block.ts';
+import { drawWatermark, lentWords, type LentTo } from './report/watermark.ts';
 
 type Named = Pick<Person, 'name' | 'role'>;
 
@@ -28,6 +29,8 @@ export interface ReportPdfInput {
   readonly plates: ReadonlyMap<string, Uint8Array>;
   /** The edition that is printed, with its seal; null: "Draft" stands in the foot. */
   readonly edition: { readonly n: number; readonly seal: string } | null;
+  /** To whom it is lent: written across every page and in its foot; absent: it is the team's own. */
+  readonly lentTo?: LentTo;
   /** Moment written on the pages and into the file, ISO 8601. */
   readonly at: string;
 }
@@ -76,11 +79,18 @@ export async function renderReportPdf(input: ReportPdfInput, onProgress?: OnProg
   drawRunningParts(writer, context.flow.frame, {
     title: problem.title,
     team: `${team.name}, ${team.university}`,
-    foot: input.edition === null ? `Draft, ${printDate(at)}` : `Edition ${input.edition.n}, ${printDate(at)}`,
+    foot: footOf(input),
     edition: input.edition,
   });
+  if (input.lentTo) drawWatermark(writer, input.lentTo);
   const pages = writer.pageCount;
   return { bytes: await writer.finish(), pages };
+}
+
+function footOf({ edition, lentTo, at }: ReportPdfInput): string {
+  const date = printDate(new Date(at));
+  if (edition === null) return `Draft, ${date}`;
+  return `Edition ${edition.n}, ${date}${lentTo ? `. ${lentWords(lentTo)}` : ''}`;
 }
 
 function teamFacts(team: ReportPdfInput['team']) {

@@ -144,7 +144,9 @@ export const openCopy = endpoint({
 export const passCopy = endpoint({
   method: 'POST',
   path: `${COPY_PATH}/opening`,
-  body: z.object({ passphrase: z.string().min(1, 'Write the passphrase that came with the address.').max(200) }),
+  body: z.object({
+    passphrase: z.string().min(1, 'Write the passphrase that came with the address.').max(200),
+  }),
   status: 204,
   answer: null,
 });

@@ -71,10 +71,7 @@ export const enterRoom = endpoint({
   method: 'POST',
   path: ROOM_PATH,
   body: z.object({
-    key: z
-      .string()
-      .min(MIN_ROOM_KEY_LENGTH, `Use at least ${MIN_ROOM_KEY_LENGTH} characters.`)
-      .max(200),
+    key: z.string().min(MIN_ROOM_KEY_LENGTH, `Use at least ${MIN_ROOM_KEY_LENGTH} characters.`).max(200),
   }),
   status: 204,
   answer: null,

@@ -1,12 +1,6 @@
 /** How far a report reaches into its evidence: every row that something in it is computed from, and no other. */
 import { parsedExpression } from '#shared/evidence/compiled-expression.ts';
-import type {
-  ClaimTest,
-  Evidence,
-  Quantity,
-  Selection,
-  ValueReference,
-} from '#shared/evidence/evidence.ts';
+import type { ClaimTest, Evidence, Quantity, Selection, ValueReference } from '#shared/evidence/evidence.ts';
 import { registerOf } from '#shared/evidence/register.ts';
 import { nodesOf } from '#shared/report/document-text.ts';
 import type { ReportDocument, ReportNode } from '#shared/report/schema/report-node.ts';

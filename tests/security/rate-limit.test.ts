@@ -50,3 +50,14 @@ test('change passphrase, when the current one is guessed at too often: is slowed
 
   expect((await attempt()).status).toBe(429);
 });
+
+test('copies, when one address tries token after token: is slowed down, whatever it asks of them', async () => {
+  const places = ['', '/standing', '/room', '/questions', '/report.pdf', '/files/x'];
+  for (const place of places) {
+    const stranger = await app.stranger();
+    expect((await stranger.get(`/api/copies/guess${place}`)).status).toBe(404);
+  }
+
+  const stranger = await app.stranger();
+  expect((await stranger.get('/api/copies/another-guess')).status).toBe(429);
+});

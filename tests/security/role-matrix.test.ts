@@ -1,6 +1,7 @@
 /** Every route the app has, called as everybody: who may, who may not, and for whom it does not exist. */
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { Express } from 'express';
+import { lend } from '#tests/support/lend.ts';
 import { startTestServer } from '#tests/support/server.ts';
 import type { SignedIn, TestServer } from '#tests/support/server.ts';
 
@@ -14,6 +15,29 @@ const RIGHTS: Readonly<Record<string, Readonly<Record<Who, 'yes' | 401 | 403 | 4
   'team reads': { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 404, 'signed out': 401 },
   'team writes': { captain: 'yes', member: 'yes', advisor: 403, 'other team': 404, 'signed out': 401 },
   'captain only': { captain: 'yes', member: 403, advisor: 403, 'other team': 404, 'signed out': 401 },
+  /** Of a copy that the captain's team has lent, with its token. */
+  'with the token': {
+    captain: 'yes',
+    member: 'yes',
+    advisor: 'yes',
+    'other team': 'yes',
+    'signed out': 'yes',
+  },
+  'token, not of the lender': {
+    captain: 404,
+    member: 404,
+    advisor: 404,
+    'other team': 'yes',
+    'signed out': 'yes',
+  },
+  /** The calls of this test have no key; the tests of the questions have. */
+  'token and key, not of the lender': {
+    captain: 404,
+    member: 404,
+    advisor: 404,
+    'other team': 403,
+    'signed out': 403,
+  },
 };
 
 const P = '/api/teams/:team/problems/:number';
@@ -56,13 +80,33 @@ const MATRIX: Readonly<Record<string, string>> = {
   [`POST ${P}/editions`]: 'captain only',
   [`GET ${P}/editions/:n`]: 'team reads',
   [`GET ${P}/editions/:n/report.pdf`]: 'team reads',
+  'GET /api/teams/:team/copies': 'team reads',
+  [`GET ${P}/copies`]: 'team reads',
+  [`POST ${P}/editions/:n/copies`]: 'captain only',
+  [`PATCH ${P}/copies/:copy`]: 'captain only',
+  [`GET ${P}/copies/:copy/preview`]: 'captain only',
+  'GET /api/copies/:token': 'with the token',
+  'POST /api/copies/:token/opening': 'with the token',
+  'GET /api/copies/:token/standing': 'with the token',
+  'GET /api/copies/:token/files/:sha': 'with the token',
+  'GET /api/copies/:token/report.pdf': 'with the token',
+  'GET /api/copies/:token/room': 'token, not of the lender',
+  'POST /api/copies/:token/room': 'token, not of the lender',
+  'PATCH /api/copies/:token/room': 'token and key, not of the lender',
+  'GET /api/copies/:token/questions': 'token and key, not of the lender',
+  'POST /api/copies/:token/questions': 'token and key, not of the lender',
+  'PATCH /api/copies/:token/questions/:question': 'token and key, not of the lender',
+  'DELETE /api/copies/:token/questions/:question': 'token and key, not of the lender',
 };
 
 let app: TestServer;
+/** Token of a copy that Tern Rock has lent. */
+let lent = '';
 const people = new Map<Who, SignedIn>();
 beforeAll(async () => {
   app = await startTestServer();
   for (const who of WHO) await enter(who);
+  ({ token: lent } = await lend(await app.signIn('ines')));
 });
 afterAll(() => app.stop());
 
@@ -89,6 +133,7 @@ async function call(who: Who, route: string): Promise<number> {
     .replace(':team', 'tern-rock')
     .replace(':number', '1')
     .replace(':person', 'absent')
+    .replace(':token', lent)
     .replaceAll(/:\w+/g, 'absent');
   switch (method) {
     case 'GET':

@@ -1,4 +1,4 @@
-import type { Express } from 'express';
+import type { Express, RequestHandler } from 'express';
 import {
   addQuestion as addQuestionEndpoint,
   changeQuestion as changeQuestionEndpoint,
@@ -10,10 +10,12 @@ import {
 } from '#shared/contracts/copy-questions.ts';
 import type { ServerDeps } from '#server/deps.ts';
 import { mountOpen, type MountOptions } from '#server/middleware/mount.ts';
+import { findCopy, noCopy } from './find-copy.ts';
 import {
   addQuestion,
   changeQuestion,
   changeRoom,
+  enter,
   enterRoom,
   getRoom,
   listQuestions,
@@ -22,7 +24,19 @@ import {
 import { keepPass, visitorOf } from './visitor.ts';
 
 /** The room of a copy's questions. */
-export function mountCopyQuestions(app: Express, deps: ServerDeps, guarded: MountOptions): void {
+export function mountCopyQuestions(app: Express, deps: ServerDeps, { before = [] }: MountOptions): void {
+  // Before anything of the request is looked at: for who lent the copy there is no room, whatever they send.
+  const refuseLenders: RequestHandler = async (request, _response, next) => {
+    if ((await findCopy(deps, visitorOf(request)))?.isLender) throw noCopy();
+    next();
+  };
+  const needKey: RequestHandler = async (request, _response, next) => {
+    await enter(deps, visitorOf(request));
+    next();
+  };
+  const guarded = { before: [...before, refuseLenders] };
+  const keyed = { before: [...guarded.before, needKey] };
+
   mountOpen(app, getRoomEndpoint, ({ request }) => getRoom(deps, visitorOf(request)), guarded);
 
   mountOpen(
@@ -38,7 +52,7 @@ export function mountCopyQuestions(app: Express, deps: ServerDeps, guarded: Moun
     app,
     changeRoomEndpoint,
     ({ request, body }) => changeRoom(deps, visitorOf(request), body.seconds),
-    guarded,
+    keyed,
   );
 
   mountOpen(app, listQuestionsEndpoint, ({ request }) => listQuestions(deps, visitorOf(request)), guarded);
@@ -47,20 +61,20 @@ export function mountCopyQuestions(app: Express, deps: ServerDeps, guarded: Moun
     app,
     addQuestionEndpoint,
     ({ request, body }) => addQuestion(deps, visitorOf(request), body),
-    guarded,
+    keyed,
   );
 
   mountOpen(
     app,
     changeQuestionEndpoint,
     ({ request, body, param }) => changeQuestion(deps, visitorOf(request), param('question'), body),
-    guarded,
+    keyed,
   );
 
   mountOpen(
     app,
     removeQuestionEndpoint,
     ({ request, param }) => removeQuestion(deps, visitorOf(request), param('question')),
-    guarded,
+    keyed,
   );
 }

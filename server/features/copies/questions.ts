@@ -177,7 +177,7 @@ async function change(
 }
 
 /** The copy, for who may be in its room: it is open, they are not of the team that lent it, and have shown the key. */
-async function enter(deps: ReadingDeps, visitor: CopyVisitor): Promise<CopyModel> {
+export async function enter(deps: ReadingDeps, visitor: CopyVisitor): Promise<CopyModel> {
   const { row, isLender } = await getOpenCopy(deps, visitor);
   if (isLender) throw noCopy();
   if (!hasKey(deps, row, visitor)) {

@@ -15,8 +15,7 @@ export async function recordView(
   const isNew = await database.write(async (transaction) => {
     const { copyViews } = database.models;
     const last = (await copyViews.max('at', { where: { copyId: copy.id, kind }, transaction })) as
-      | string
-      | null;
+      string | null;
     if (last !== null && at.getTime() - Date.parse(last) < SAME_VIEW_MS) return false;
     await copyViews.create({ copyId: copy.id, at: at.toISOString(), kind }, { transaction });
     return true;

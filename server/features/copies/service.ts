@@ -107,7 +107,8 @@ export async function changeCopy(
 
 function assertTimes(from: string, until: string, now: Date): void {
   const ends = Date.parse(until);
-  if (ends <= Date.parse(from)) throw invalid({ until: 'It must close after it opens. Choose a later time.' });
+  if (ends <= Date.parse(from))
+    throw invalid({ until: 'It must close after it opens. Choose a later time.' });
   if (ends <= now.getTime()) throw invalid({ until: 'This time is over. Choose one that lies ahead.' });
 }
 
