@@ -7,13 +7,20 @@ export function useRegionRing(): void {
       if (event.key !== 'F6' || event.ctrlKey || event.altKey || event.metaKey) return;
       if (document.querySelector('[role=dialog][data-state=open]')) return;
       const regions = [...document.querySelectorAll<HTMLElement>('[data-region]')];
-      const at = regions.findIndex((region) => region.contains(document.activeElement));
+      // A bar may stand inside the page: the innermost region is where one is.
+      const at = regions.findLastIndex((region) => region.contains(document.activeElement));
       const next = regions[event.shiftKey ? (at === -1 ? regions.length : at) - 1 : at + 1];
       if (!next) return;
       event.preventDefault();
-      (next.querySelector<HTMLElement>('[data-region-start]') ?? next).focus();
+      startOf(next).focus();
     };
     window.addEventListener('keydown', onKey);
     return () => window.removeEventListener('keydown', onKey);
   }, []);
+}
+
+/** Where one begins in a region: what it marks itself, not what a region inside it marks. */
+function startOf(region: HTMLElement): HTMLElement {
+  const marked = [...region.querySelectorAll<HTMLElement>('[data-region-start]')];
+  return marked.find((start) => start.closest('[data-region]') === region) ?? region;
 }

@@ -21,6 +21,11 @@ function Page() {
       <KeysSlip />
       <main data-region="page" tabIndex={-1} aria-label="page">
         <input aria-label="reading" />
+        <form data-region="entry bar" tabIndex={-1}>
+          <button type="button" data-region-start>
+            Lean
+          </button>
+        </form>
       </main>
       <div data-region="sill" tabIndex={-1}>
         <button data-region-start>Formula</button>
@@ -86,14 +91,16 @@ test('keys slip, when Escape is pressed: closes and gives the focus back', async
   expect(document.activeElement).toBe(screen.getByRole('button', { name: 'Keys' }));
 });
 
-test('F6: goes to the page, then to where the sill begins, and with Shift back', async () => {
+test('F6: goes to the page, to the bar inside it, to where the sill begins, and with Shift back', async () => {
   const { user } = open();
 
   await user.keyboard('{F6}');
   expect(document.activeElement).toBe(screen.getByRole('main'));
   await user.keyboard('{F6}');
+  expect(document.activeElement).toBe(screen.getByRole('button', { name: 'Lean' }));
+  await user.keyboard('{F6}');
   expect(document.activeElement).toBe(screen.getByRole('button', { name: 'Formula' }));
-  await user.keyboard('{Shift>}{F6}{/Shift}');
+  await user.keyboard('{Shift>}{F6}{/Shift}{Shift>}{F6}{/Shift}');
 
   expect(document.activeElement).toBe(screen.getByRole('main'));
 });

@@ -2,6 +2,7 @@ import type { Editor } from '@tiptap/react';
 import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { Findings } from '#shared/evidence/findings.ts';
 import { optionsForSymbol } from '#shared/report/value-options.ts';
+import { say } from '#src/lib/sill-store.ts';
 import { putIn } from '../editor/put-in.ts';
 import type { ListedOption } from './list-at-place.tsx';
 
@@ -17,6 +18,7 @@ export interface PutInOption extends ListedOption {
 export function putInOptions(
   kind: Exclude<Kind, 'Plate'>,
   editor: Editor,
+  askLink: () => void,
   evidence: Evidence,
   findings: Findings,
 ): readonly PutInOption[] {
@@ -41,6 +43,7 @@ export function putInOptions(
       }));
     case 'Table':
       return [
+        ...typedTableOptions(editor),
         ...evidence.series.map(({ id, letter, name }) => ({
           key: id,
           words: `trials of series ${letter}, ${name}`,
@@ -55,7 +58,7 @@ export function putInOptions(
         run: () => putIn.claim(editor, id),
       }));
     case 'Line':
-      return lineOptions(editor);
+      return lineOptions(editor, askLink);
   }
 }
 
@@ -85,7 +88,7 @@ function formulaOptions(editor: Editor, evidence: Evidence): readonly PutInOptio
 }
 
 /** What the line at the caret is: the keys for bold and italic work besides. */
-function lineOptions(editor: Editor): readonly PutInOption[] {
+function lineOptions(editor: Editor, askLink: () => void): readonly PutInOption[] {
   const chain = () => editor.chain().focus();
   return [
     { key: 'paragraph', words: 'plain line', run: () => void chain().setParagraph().run() },
@@ -95,6 +98,47 @@ function lineOptions(editor: Editor): readonly PutInOption[] {
     { key: 'numbers', words: 'list with numbers', run: () => void chain().toggleOrderedList().run() },
     { key: 'bold', words: 'bold', text: 'Ctrl B', run: () => void chain().toggleBold().run() },
     { key: 'italic', words: 'italic', text: 'Ctrl I', run: () => void chain().toggleItalic().run() },
+    ...linkOptions(editor, askLink),
     { key: 'undo', words: 'undo my last change', text: 'Ctrl Z', run: () => void chain().undo().run() },
+  ];
+}
+
+function linkOptions(editor: Editor, askLink: () => void): readonly PutInOption[] {
+  if (editor.isActive('link')) {
+    const remove = () => void editor.chain().focus().extendMarkRange('link').unsetLink().run();
+    return [
+      { key: 'link', words: 'change where the link leads', run: askLink },
+      { key: 'follow', words: 'follow the link', run: () => follow(editor) },
+      { key: 'unlink', words: 'no link any more', run: remove },
+    ];
+  }
+  const ask = () => {
+    if (!editor.state.selection.empty) return askLink();
+    editor.commands.focus();
+    say('Choose the words that shall lead somewhere, then take link.');
+  };
+  return [{ key: 'link', words: 'link, on the chosen words', run: ask }];
+}
+
+function follow(editor: Editor): void {
+  window.open(String(editor.getAttributes('link').href), '_blank', 'noopener');
+}
+
+/** Rows and columns of the typed table that the caret is in. */
+function typedTableOptions(editor: Editor): readonly PutInOption[] {
+  if (!editor.isActive('table')) return [];
+  const chain = () => editor.chain().focus();
+  return [
+    { key: 'row below', words: 'one more row below', run: () => void chain().addRowAfter().run() },
+    { key: 'row above', words: 'one more row above', run: () => void chain().addRowBefore().run() },
+    { key: 'column after', words: 'one more column after', run: () => void chain().addColumnAfter().run() },
+    {
+      key: 'column before',
+      words: 'one more column before',
+      run: () => void chain().addColumnBefore().run(),
+    },
+    { key: 'no row', words: 'take this row out', run: () => void chain().deleteRow().run() },
+    { key: 'no column', words: 'take this column out', run: () => void chain().deleteColumn().run() },
+    { key: 'no table', words: 'take the whole table out', run: () => void chain().deleteTable().run() },
   ];
 }

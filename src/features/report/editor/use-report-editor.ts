@@ -11,7 +11,11 @@ import type { ReportSession } from '../session/report-session.ts';
 import type { OpenValue } from '../views/live-value-view.ts';
 import { reportNodeViews } from '../views/report-node-views.ts';
 import { FillSections } from './fill-sections.ts';
+import { foldedSections } from './folded-sections.ts';
 import { lookAgain, LooseNumbers } from './loose-numbers.ts';
+import { readingMarks } from './reading-marks.ts';
+import { UnfoldAtCaret } from './unfold-at-caret.ts';
+import { VisitedLines } from './visited-lines.ts';
 
 /** A colleague's caret is ink; which colleague is said beside the section, in words. */
 const CARET_COLOUR = '#3c525a';
@@ -22,19 +26,22 @@ export function useReportEditor(
   readOnly: boolean,
   onOpen: (value: OpenValue) => void,
 ): Editor {
-  const { store, me, role } = useProblem();
+  const { store, me, role, address } = useProblem();
   const evidence = useEvidence();
   // The extensions are made once; what they call and read changes under them.
   const [open] = useState(() => createStore(onOpen));
   const [settings] = useState(() => createStore(settingNames(evidence)));
   useEffect(() => open.set(onOpen), [open, onOpen]);
+  const report = `${address.team}/${address.number}`;
+  const [marks] = useState(() => readingMarks(`${report} ${me}`));
+  const [folded] = useState(() => foldedSections(report));
   const editor = useEditor(
     {
       editable: !readOnly,
       injectCSS: false,
       shouldRerenderOnTransaction: false,
       extensions: [
-        ...reportExtensions(reportNodeViews(store, (value) => open.get()(value))),
+        ...reportExtensions(reportNodeViews({ store, marks, folded, onOpen: (value) => open.get()(value) })),
         Collaboration.configure({ fragment: session.fragment }),
         CollaborationCaret.configure({
           provider: session.provider,
@@ -42,6 +49,8 @@ export function useReportEditor(
           render: drawCaret,
         }),
         FillSections,
+        VisitedLines,
+        UnfoldAtCaret.configure({ folded }),
         LooseNumbers.configure({ getSettings: settings.get }),
       ],
       editorProps: {

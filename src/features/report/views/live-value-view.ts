@@ -4,6 +4,9 @@ import { NodeSelection } from '@tiptap/pm/state';
 import { splitSymbol } from '#shared/formatting/symbol.ts';
 import { showValue, type Shown } from '#shared/report/live-value.ts';
 import { LiveValue, type LiveValueAttributes } from '#shared/report/schema/live-value-node.ts';
+import { LINE_VISITED } from '../editor/visited-lines.ts';
+import type { ReadingMarks } from '../editor/reading-marks.ts';
+import { MovedMark } from './moved-mark.ts';
 import { liveValueClass } from '#src/components/live-value-text.tsx';
 import type { FindingsStore } from '#src/lib/findings/findings-store.ts';
 
@@ -16,6 +19,7 @@ export interface OpenValue {
 
 interface LiveValueOptions {
   readonly store: FindingsStore | null;
+  readonly marks: ReadingMarks | null;
   readonly onOpen: (value: OpenValue) => void;
 }
 
@@ -23,7 +27,7 @@ interface LiveValueOptions {
 export const LiveValueView = TiptapNode.create<LiveValueOptions>({
   ...LiveValue.config,
   name: 'liveValue',
-  addOptions: () => ({ store: null, onOpen: () => undefined }),
+  addOptions: () => ({ store: null, marks: null, onOpen: () => undefined }),
   addKeyboardShortcuts() {
     return {
       Enter: ({ editor }) => {
@@ -37,7 +41,7 @@ export const LiveValueView = TiptapNode.create<LiveValueOptions>({
     };
   },
   addNodeView() {
-    const { store, onOpen } = this.options;
+    const { store, marks, onOpen } = this.options;
     return ({ node }) => {
       const dom = document.createElement('span');
       dom.contentEditable = 'false';
@@ -46,13 +50,21 @@ export const LiveValueView = TiptapNode.create<LiveValueOptions>({
       dom.setAttribute('aria-haspopup', 'dialog');
       let attrs = attributesOf(node);
       let stop: (() => void) | undefined;
-      const draw = () => drawValue(dom, attrs, store);
+      const mark = new MovedMark(dom, marks);
+      const draw = () => {
+        const text = drawValue(dom, attrs, store);
+        mark.show(JSON.stringify([attrs.ref, attrs.form, attrs.unit]), text);
+      };
       const bind = () => {
         stop?.();
         stop = store?.subscribeTo(attrs.ref, draw);
         draw();
       };
-      const open = (byKey: boolean) => onOpen({ attrs, element: dom, byKey });
+      const open = (byKey: boolean) => {
+        mark.visit();
+        onOpen({ attrs, element: dom, byKey });
+      };
+      dom.addEventListener(LINE_VISITED, () => mark.visit());
       dom.addEventListener('click', () => open(false));
       dom.addEventListener('keydown', (event) => {
         if (event.key !== 'Enter' && event.key !== ' ') return;
@@ -71,7 +83,10 @@ export const LiveValueView = TiptapNode.create<LiveValueOptions>({
         },
         ignoreMutation: () => true,
         stopEvent: (event) => event.type === 'keydown' && event.target === dom,
-        destroy: () => stop?.(),
+        destroy: () => {
+          stop?.();
+          mark.forget();
+        },
       };
     };
   },
@@ -79,15 +94,16 @@ export const LiveValueView = TiptapNode.create<LiveValueOptions>({
 
 const attributesOf = (node: ProseMirrorNode) => node.attrs as LiveValueAttributes;
 
-function drawValue(dom: HTMLElement, attrs: LiveValueAttributes, store: FindingsStore | null): void {
+function drawValue(dom: HTMLElement, attrs: LiveValueAttributes, store: FindingsStore | null): string | null {
   const snapshot = store?.get();
-  if (!snapshot) return;
+  if (!snapshot) return null;
   const shown = showValue(attrs.ref, attrs.form, attrs.unit, snapshot.evidence, snapshot.findings);
   const isGone = shown.state === 'fault';
   dom.className = liveValueClass(shown.hue, isGone ? 'gone' : 'fresh', false);
   dom.setAttribute('aria-label', isGone ? `${shown.spoken}. ${shown.fault?.sentence ?? ''}` : shown.spoken);
   dom.dataset.shown = shown.text;
   dom.replaceChildren(...piecesOf(shown, isGone ? attrs.shown : null));
+  return isGone ? null : shown.text;
 }
 
 function piecesOf(shown: Shown, lastShown: string | null): (Node | string)[] {

@@ -6,28 +6,34 @@ import { Plate } from '#shared/report/schema/plate-node.ts';
 import type { ReportNodeOverrides } from '#shared/report/schema/report-extensions.ts';
 import { TrialsTable } from '#shared/report/schema/trials-table-node.ts';
 import type { FindingsStore } from '#src/lib/findings/findings-store.ts';
+import type { FoldedSections } from '../editor/folded-sections.ts';
+import type { ReadingMarks } from '../editor/reading-marks.ts';
 import { ChartBlockView } from './chart-block.tsx';
 import { ClaimBlockView } from './claim-block.tsx';
 import { FormulaBlock } from './formula-block.tsx';
 import { InlineFormulaView } from './inline-formula-view.ts';
 import { LiveValueView, type OpenValue } from './live-value-view.ts';
 import { PlateBlock } from './plate-block.tsx';
-import { SectionViews } from './section-view.ts';
+import { sectionViews } from './section-view.ts';
 import { TrialsTableBlock } from './trials-table-block.tsx';
 
+interface NodeViewParts {
+  readonly store: FindingsStore;
+  readonly marks: ReadingMarks;
+  readonly folded: FoldedSections;
+  readonly onOpen: (value: OpenValue) => void;
+}
+
 /** The report's nodes with how they are drawn on screen. */
-export function reportNodeViews(
-  store: FindingsStore,
-  onOpen: (value: OpenValue) => void,
-): ReportNodeOverrides {
+export function reportNodeViews({ store, marks, folded, onOpen }: NodeViewParts): ReportNodeOverrides {
   return {
-    liveValue: LiveValueView.configure({ store, onOpen }),
+    liveValue: LiveValueView.configure({ store, marks, onOpen }),
     inlineFormula: InlineFormulaView,
     formula: Formula.extend({ addNodeView: () => ReactNodeViewRenderer(FormulaBlock) }),
     chart: ChartBlock.extend({ addNodeView: () => ReactNodeViewRenderer(ChartBlockView) }),
     trialsTable: TrialsTable.extend({ addNodeView: () => ReactNodeViewRenderer(TrialsTableBlock) }),
     claim: ClaimBlock.extend({ addNodeView: () => ReactNodeViewRenderer(ClaimBlockView) }),
     plate: Plate.extend({ addNodeView: () => ReactNodeViewRenderer(PlateBlock) }),
-    sections: SectionViews,
+    sections: sectionViews(folded),
   };
 }
