@@ -27,6 +27,10 @@ export function renderAt(address: string) {
 
 /** What a field holds. */
 export function valueOf(element: HTMLElement): string {
-  if (element instanceof HTMLInputElement || element instanceof HTMLTextAreaElement) return element.value;
+  const isField =
+    element instanceof HTMLInputElement ||
+    element instanceof HTMLTextAreaElement ||
+    element instanceof HTMLSelectElement;
+  if (isField) return element.value;
   throw new Error(`valueOf: needs a field, got ${element.tagName}`);
 }
