@@ -1,5 +1,6 @@
 /** Editions: frozen once, never changed. Everybody of the team reads them; the captain freezes. */
 import { z } from 'zod';
+import { editionComparisonSchema } from '#shared/editions/edition-comparison.ts';
 import { frozenEditionSchema } from '#shared/editions/frozen-edition.ts';
 import { endpoint, PROBLEM_PATH } from './endpoint.ts';
 
@@ -61,4 +62,13 @@ export const getEditionPdf = endpoint({
   body: null,
   status: 200,
   answer: null,
+});
+
+/** What moved from edition n to `other`: another edition's number, or `draft`. */
+export const compareEditions = endpoint({
+  method: 'GET',
+  path: `${PROBLEM_PATH}/editions/:n/compare/:other`,
+  body: null,
+  status: 200,
+  answer: editionComparisonSchema,
 });

@@ -80,6 +80,7 @@ const MATRIX: Readonly<Record<string, string>> = {
   [`POST ${P}/editions`]: 'captain only',
   [`GET ${P}/editions/:n`]: 'team reads',
   [`GET ${P}/editions/:n/report.pdf`]: 'team reads',
+  [`GET ${P}/editions/:n/compare/:other`]: 'team reads',
   'GET /api/teams/:team/copies': 'team reads',
   [`GET ${P}/copies`]: 'team reads',
   [`POST ${P}/editions/:n/copies`]: 'captain only',

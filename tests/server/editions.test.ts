@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { Edition } from '#shared/contracts/editions.ts';
+import { editionComparisonSchema } from '#shared/editions/edition-comparison.ts';
 import { frozenEditionSchema, type FrozenEdition } from '#shared/editions/frozen-edition.ts';
 import { sealFigures, sealOf } from '#shared/editions/seal.ts';
 import { editionFigures } from '#shared/editions/edition-figures.ts';
@@ -212,5 +213,59 @@ describe('the PDF', () => {
       expect(text).toContain(`seal ${sealFigures(edition.seal)}`);
       expect(text).not.toContain('Draft');
     }
+  });
+});
+
+describe('laying beside', () => {
+  test('an edition and the draft, when a trial was logged since: tell it, and the numbers that follow it', async () => {
+    const { body } = await kasimir.get(`${SPOUT}/editions/${newest}/compare/draft`);
+
+    const comparison = editionComparisonSchema.parse(body);
+    expect(comparison.trials).toEqual(['1 trial logged: B20.']);
+    expect(comparison.values.map(({ name }) => name)).toContain('range on the tray at 38°');
+    expect(comparison.passages).toEqual([]);
+  });
+
+  test('the demonstration’s two editions, when laid beside each other: tell words, verdicts, trials and definitions', async () => {
+    const { body } = await ines.get(`${SPOUT}/editions/1/compare/2`);
+
+    const comparison = editionComparisonSchema.parse(body);
+    expect(comparison.trials[0]).toBe('12 trials logged: B1 to B12.');
+    expect(comparison.verdicts).toContainEqual(
+      expect.objectContaining({ n: 2, before: 'Undecided', after: 'Holds' }) as unknown,
+    );
+    expect(comparison.definitions.join(' ')).toContain('model 3');
+    expect(comparison.passages.length).toBeGreaterThan(5);
+  });
+
+  test.each(['1/compare/99', '99/compare/draft', '1/compare/none'])(
+    '%s, when asked for: is not there',
+    async (path) => {
+      expect((await ines.get(`${SPOUT}/editions/${path}`)).status).toBe(404);
+    },
+  );
+});
+
+describe('the demonstration', () => {
+  test('its editions, when it was loaded: are two, of 12 and of 24 trials, each with a seal that holds', async () => {
+    const [second, first] = (await listOf(SPOUT)).slice(-2);
+
+    expect([first, second].map((edition) => [edition?.n, edition?.trials, edition?.by])).toEqual([
+      [1, 12, 'Ines Farrow'],
+      [2, 24, 'Ines Farrow'],
+    ]);
+    for (const n of [1, 2]) {
+      const { edition, content } = await getEdition(app.server.deps.database, await problemId(1), n);
+      expect(sealOf(content, sha256)).toBe(edition.seal);
+    }
+  });
+
+  test('the PDF of one, when first asked for by two at once: is printed, and the same bytes are kept for ever', async () => {
+    const [first, second] = await Promise.all([pdfOf(SPOUT, 1), pdfOf(SPOUT, 1)]);
+
+    const kept = (await listOf(SPOUT)).find(({ n }) => n === 1);
+    expect(sha256(first)).toBe(kept?.pdfSha);
+    expect(sha256(second)).toBe(kept?.pdfSha);
+    expect((await readPdf(first)).text).toContain('Edition 1, 15 February 2026');
   });
 });

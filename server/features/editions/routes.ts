@@ -1,5 +1,6 @@
 import type { Express } from 'express';
 import {
+  compareEditions as compareEditionsEndpoint,
   freezeEdition as freezeEditionEndpoint,
   getEdition as getEditionEndpoint,
   getEditionPdf as getEditionPdfEndpoint,
@@ -9,6 +10,7 @@ import type { ServerDeps } from '#server/deps.ts';
 import { notFound } from '#server/errors/refusals.ts';
 import { mountProblem } from '#server/middleware/mount.ts';
 import { sendPdf } from '#server/middleware/send-pdf.ts';
+import { compareWith } from './compare.ts';
 import { freezeEdition, getEdition, getEditionPdf, listEditions } from './service.ts';
 
 export function mountEditions(app: Express, deps: ServerDeps): void {
@@ -30,6 +32,11 @@ export function mountEditions(app: Express, deps: ServerDeps): void {
   mountProblem(app, database, getEditionPdfEndpoint, 'read', async ({ place, param, response }) =>
     sendPdf(response, await getEditionPdf(deps, place, numberIn(param('n')))),
   );
+
+  mountProblem(app, database, compareEditionsEndpoint, 'read', ({ place, param }) => {
+    const other = param('other');
+    return compareWith(deps, place, numberIn(param('n')), other === 'draft' ? other : numberIn(other));
+  });
 }
 
 /** The number of an edition as an address has it; 404 for what is none. */

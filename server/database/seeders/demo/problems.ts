@@ -6,6 +6,7 @@ import { brakedMagnetReport } from './braked-magnet-report.ts';
 import { fallingCupsEvidence } from './falling-cups-evidence.ts';
 import { fallingCupsReport } from './falling-cups-report.ts';
 import { leaningSpoutEvidence } from './leaning-spout-evidence.ts';
+import { leaningSpoutEditions, type DemoEdition } from './leaning-spout-past.ts';
 import { leaningSpoutReport } from './leaning-spout-report.ts';
 
 export interface DemoProblem {
@@ -20,6 +21,8 @@ export interface DemoProblem {
   readonly work: {
     readonly evidence: (firstStart: Date) => Evidence;
     readonly report: (evidence: Evidence) => ReportDocument;
+    /** What was frozen before the first start, the oldest first. */
+    readonly editions?: (firstStart: Date) => readonly DemoEdition[];
   } | null;
 }
 
@@ -43,7 +46,11 @@ export const DEMO_PROBLEMS: readonly DemoProblem[] = [
       { id: 'task-limits', text: 'What sets the limits of the prediction?' },
     ],
     owners: ['demo-ines', 'demo-kasimir'],
-    work: { evidence: leaningSpoutEvidence, report: leaningSpoutReport },
+    work: {
+      evidence: leaningSpoutEvidence,
+      report: leaningSpoutReport,
+      editions: leaningSpoutEditions,
+    },
   },
   {
     number: 4,

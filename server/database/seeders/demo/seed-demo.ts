@@ -9,6 +9,7 @@ import { demoFights, demoSeason } from './fights.ts';
 import { DEMO_PEOPLE } from './people.ts';
 import { DEMO_PROBLEMS, DEMO_SETTINGS } from './problems.ts';
 import type { DemoProblem } from './problems.ts';
+import { seedEditions } from './seed-editions.ts';
 
 const TEAMS = [
   { id: 'demo-tern-rock', slug: 'tern-rock', name: 'Tern Rock', university: 'Skerry University' },
@@ -108,6 +109,8 @@ async function insertProblem(
   await storeEvidence(database, id, evidence, userIdOf, transaction);
   const report = problem.work?.report(evidence) ?? emptyReport();
   await seedReport(database, id, report, firstStart.toISOString(), transaction);
+  const editions = problem.work?.editions?.(firstStart) ?? [];
+  await seedEditions(database, { ...problem, id }, TEAMS[0], editions, transaction);
 }
 
 /** A problem that nobody has begun: each verb of the task waits as a claim without a test. */
