@@ -55,7 +55,7 @@ export const getEdition = endpoint({
   answer: z.object({ edition: editionSchema, content: frozenEditionSchema }),
 });
 
-/** Its PDF: the same bytes every time. */
+/** Its PDF: the same bytes every time; with `?show` to be shown, else to be saved. */
 export const getEditionPdf = endpoint({
   method: 'GET',
   path: `${PROBLEM_PATH}/editions/:n/report.pdf`,

@@ -1,7 +1,7 @@
 import type { ProblemAddress } from './problem/problem-address.ts';
 
 /** A problem's stations in their order; the digit keys follow it. */
-export const STATIONS = ['trials', 'model', 'report'] as const;
+export const STATIONS = ['trials', 'model', 'report', 'editions'] as const;
 export type Station = (typeof STATIONS)[number];
 
 function problem({ team, number }: ProblemAddress): string {
@@ -26,5 +26,8 @@ export const paths = {
   /** `hash` is a section's number or an anchor in the document. */
   report: (at: ProblemAddress, hash?: string | number) =>
     `${problem(at)}/report${hash === undefined ? '' : `#${hash}`}`,
+  /** Laid beside the draft, or beside another edition. */
+  edition: (at: ProblemAddress, n: number, beside?: number) =>
+    `${problem(at)}/editions/${n}${beside === undefined ? '' : `?beside=${beside}`}`,
   settings: (at: ProblemAddress) => `${problem(at)}/settings`,
 };

@@ -29,9 +29,10 @@ export function mountEditions(app: Express, deps: ServerDeps): void {
     return { edition, content };
   });
 
-  mountProblem(app, database, getEditionPdfEndpoint, 'read', async ({ place, param, response }) =>
-    sendPdf(response, await getEditionPdf(deps, place, numberIn(param('n')))),
-  );
+  mountProblem(app, database, getEditionPdfEndpoint, 'read', async ({ place, param, request, response }) => {
+    const file = await getEditionPdf(deps, place, numberIn(param('n')));
+    sendPdf(response, file, 'show' in request.query ? 'inline' : 'attachment');
+  });
 
   mountProblem(app, database, compareEditionsEndpoint, 'read', ({ place, param }) => {
     const other = param('other');

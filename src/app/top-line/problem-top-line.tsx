@@ -13,7 +13,12 @@ import { HereWords } from './here-words.tsx';
 import { stationOf } from './station-of.ts';
 import { TopLine } from './top-line.tsx';
 
-const WORDS: Readonly<Record<Station, string>> = { trials: 'Trials', model: 'Model', report: 'Report' };
+const WORDS: Readonly<Record<Station, string>> = {
+  trials: 'Trials',
+  model: 'Model',
+  report: 'Report',
+  editions: 'Editions',
+};
 
 /** The top line of a problem: its stations, the next fight, and who is here. */
 export function ProblemTopLine() {
@@ -61,10 +66,12 @@ export function ProblemTopLine() {
   );
 }
 
-function usualCup(station: Station, evidence: Evidence): string {
+/** null: the screen itself says it. */
+function usualCup(station: Station, evidence: Evidence): string | null {
   if (station === 'trials')
     return countOf(evidence.trials.filter(({ withdrawn }) => !withdrawn).length, 'trial');
   if (station === 'report') return 'draft';
+  if (station === 'editions') return null;
   const newest = Math.max(0, ...evidence.models.map(({ n }) => n));
   return newest === 0 ? 'no model yet' : `model ${newest}`;
 }

@@ -75,6 +75,7 @@ test('problem, when it is opened the first time: begins at Trials, with its coun
     'Trials1 trial',
     'Model',
     'Report',
+    'Editions',
   ]);
   expect(stations.getByRole('link', { name: /Trials/ }).getAttribute('aria-current')).toBe('page');
   expect(router.state.location.pathname).toBe('/team/tern-rock/problem/1/trials');

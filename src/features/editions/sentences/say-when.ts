@@ -1,0 +1,22 @@
+import type { Edition } from '#shared/contracts/editions.ts';
+import { dayAndMonth, timeOfDay } from '#src/lib/dates/say-date.ts';
+import { countOf } from '#src/lib/say/say-number.ts';
+
+/** "28 February, 17:40, by Ines Farrow" */
+export function frozenWords({ at, by }: Pick<Edition, 'at' | 'by'>): string {
+  const moment = new Date(at);
+  return `${dayAndMonth(moment)}, ${timeOfDay(moment)}, by ${by}`;
+}
+
+/** "6 pages, 24 trials, 41 tied numbers"; without pages before its PDF was printed. */
+export function figureWords({
+  pages,
+  trials,
+  tiedNumbers,
+}: Pick<Edition, 'pages' | 'trials' | 'tiedNumbers'>): string {
+  return [
+    ...(pages === null ? [] : [countOf(pages, 'page')]),
+    countOf(trials, 'trial'),
+    countOf(tiedNumbers, 'tied number'),
+  ].join(', ');
+}
