@@ -4,6 +4,7 @@ import { Arrow } from '#src/components/arrow.tsx';
 import { liveValueClass } from '#src/components/live-value-text.tsx';
 import { SentenceText } from '#src/components/sentence-text.tsx';
 import { VerdictMark } from '#src/components/verdict.tsx';
+import { useSymbols } from '../view/use-symbols.ts';
 import { paths } from '#src/lib/paths.ts';
 import type { ProblemAddress } from '#src/lib/problem/problem-address.ts';
 
@@ -66,9 +67,12 @@ export function MovedVerdictLine({
 
 /** A sentence of what moved besides. */
 export function MovedSentence({ sentence }: { readonly sentence: string }) {
+  const symbols = useSymbols();
   return (
     <li className={LINE}>
-      <SentenceText text={sentence} />
+      <span>
+        <SentenceText text={sentence} symbols={symbols} />
+      </span>
     </li>
   );
 }

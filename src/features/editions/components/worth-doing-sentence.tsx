@@ -31,7 +31,7 @@ export function WorthDoingSentence({ address, others = [] }: WorthDoingSentenceP
           ? 'Nothing: every number is tied and every claim is decided.'
           : things.map(({ key, linked, after, to }, index) => (
               <Fragment key={key}>
-                {index > 0 && (index === things.length - 1 ? ' and ' : ', ')}
+                {index > 0 && (index === things.length - 1 ? ', and ' : ', ')}
                 <Link to={to} className="border-b-[1.25px] border-edge text-ink hover:border-ink">
                   {index === 0 ? capital(linked) : linked}
                 </Link>

@@ -1,12 +1,15 @@
 import type { Edition } from '#shared/contracts/editions.ts';
-import { dayAndMonth, timeOfDay } from '#src/lib/dates/say-date.ts';
+import { dayAndShortMonth, timeOfDay } from '#src/lib/dates/say-date.ts';
 import { countOf } from '#src/lib/say/say-number.ts';
 
-/** "28 February, 17:40, by Ines Farrow" */
+/** "28 Feb, 17:40, by Ines Farrow" */
 export function frozenWords({ at, by }: Pick<Edition, 'at' | 'by'>): string {
   const moment = new Date(at);
-  return `${dayAndMonth(moment)}, ${timeOfDay(moment)}, by ${by}`;
+  return `${dayAndShortMonth(moment)}, ${timeOfDay(moment)}, by ${by.replaceAll(' ', NO_BREAK)}`;
 }
+
+/** A name stays on one line. */
+const NO_BREAK = '\u00A0';
 
 /** "6 pages, 24 trials, 41 tied numbers"; without pages before its PDF was printed. */
 export function figureWords({
