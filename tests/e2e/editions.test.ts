@@ -53,6 +53,7 @@ test('a PDF, when saved twice: is the same file, also after the server was resta
   const first = await savedPdf(captain, 1);
   const frozen = await savedPdf(captain, 3);
 
+  await app.kill();
   await app.restart();
   await captain.goto(app.url + EDITIONS);
 
@@ -63,10 +64,7 @@ test('a PDF, when saved twice: is the same file, also after the server was resta
 test('an edition, when laid beside the draft and beside another: tells what moved in numbers and in words', async () => {
   await captain.goto(app.url + EDITIONS);
 
-  await captain
-    .getByRole('listitem', { name: 'Edition 2' })
-    .getByRole('link', { name: 'Lay beside the draft' })
-    .click();
+  await captain.getByRole('link', { name: 'Lay beside the draft: edition 2' }).click();
   const draft = captain.getByRole('region', { name: 'What moved from edition 2 to the draft' });
   await draft.getByText('7 trials logged: B13 to B19.').waitFor();
   await draft.locator('ins').first().waitFor();

@@ -36,7 +36,7 @@ export function DraftRow({ address, latest, othersWorthDoing }: DraftRowProps) {
           )}
         </p>
       </div>
-      <div className="min-w-0 max-[1099.98px]:order-last max-[1099.98px]:col-span-full max-md:order-none">
+      <div className="min-w-0">
         {latest ? (
           <MovedSince address={address} n={latest.n} />
         ) : (

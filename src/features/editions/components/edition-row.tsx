@@ -9,7 +9,7 @@ import { PdfLink } from './pdf-link.tsx';
 
 /** Three columns where there is room: what it is, what is said of it, what can be done. */
 export const EDITION_GRID =
-  'grid grid-cols-[296px_minmax(0,1fr)_250px] gap-x-[34px] gap-y-5 px-[30px] pt-[22px] pb-6 max-[1099.98px]:grid-cols-[minmax(0,1fr)_220px] max-md:grid-cols-1 max-sm:px-4.5';
+  'grid grid-cols-[316px_minmax(0,1fr)_250px] gap-x-[34px] gap-y-5 px-[30px] pt-[22px] pb-6 max-[1099.98px]:grid-cols-[316px_minmax(0,1fr)] max-md:grid-cols-1 max-sm:px-4.5';
 
 interface EditionRowProps {
   readonly address: ProblemAddress;
@@ -38,18 +38,21 @@ export function EditionRow({ address, edition, holders, actions }: EditionRowPro
           </p>
         </div>
       </div>
-      <div className="min-w-0 max-[1099.98px]:order-last max-[1099.98px]:col-span-full max-md:order-none">
+      <div className="min-w-0">
         {note !== '' && (
           <p className="mb-3 max-w-[560px] font-report text-note text-ink-2 italic last:mb-0">{note}</p>
         )}
         {holders}
       </div>
-      <div className="flex flex-col items-start gap-2">
+      <div className="flex flex-col items-start gap-2 max-[1099.98px]:col-span-full max-[1099.98px]:flex-row max-[1099.98px]:flex-wrap max-[1099.98px]:items-center max-[1099.98px]:gap-x-4">
         {actions}
         <PdfLink address={address} n={n} />
-        <WordLink className="mt-1 text-sm" to={paths.edition(address, n)}>
+        <WordLink
+          className="mt-1 text-sm"
+          to={paths.edition(address, n)}
+          aria-label={`Lay beside the draft: edition ${n}`}
+        >
           Lay beside the draft
-          <span className="sr-only"> edition {n}</span>
         </WordLink>
       </div>
     </li>

@@ -8,9 +8,10 @@ export function PdfLink({ address, n }: { readonly address: ProblemAddress; read
     <a
       href={addressOf(getEditionPdf.path, { ...address, n })}
       download
+      aria-label={`Print or save PDF of edition ${n}`}
       className="inline-flex min-h-9 items-center rounded-md border-[1.25px] border-edge bg-paper px-3.5 text-sm font-[550]"
     >
-      Print or save PDF<span className="sr-only"> of edition {n}</span>
+      Print or save PDF
     </a>
   );
 }

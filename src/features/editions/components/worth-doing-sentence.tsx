@@ -24,7 +24,7 @@ export function WorthDoingSentence({ address, others = [] }: WorthDoingSentenceP
   if (!worth) return null;
   const things = [...worth, ...others];
   return (
-    <div>
+    <div className="max-[1099.98px]:col-span-full">
       <h3 className="mb-1 text-sm font-[650]">Worth doing before you freeze</h3>
       <p className="font-report text-[16px]/6 text-ink-2">
         {things.length === 0
