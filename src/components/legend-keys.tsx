@@ -1,3 +1,5 @@
+import { SentenceText } from './sentence-text.tsx';
+
 /** How measured things are drawn, everywhere. */
 export function MeasuredKey({ words = 'measured' }: { readonly words?: string }) {
   return (
@@ -6,7 +8,9 @@ export function MeasuredKey({ words = 'measured' }: { readonly words?: string })
         <path d="M11 1v12M8.5 1h5M8.5 13h5" stroke="currentColor" strokeWidth="1.3" />
         <circle cx="11" cy="7" r="3.4" fill="currentColor" />
       </svg>
-      {words}
+      <span>
+        <SentenceText text={words} />
+      </span>
     </span>
   );
 }
@@ -18,7 +22,9 @@ export function PredictedKey({ words = 'predicted' }: { readonly words?: string 
         <path d="M0 2.5C8 2 14 4 22 6v7C14 11 8 9 0 9.5z" fill="currentColor" opacity=".2" />
         <path d="M0 6c8-.5 14 1.5 22 3.5" stroke="currentColor" strokeWidth="2" fill="none" />
       </svg>
-      {words}
+      <span>
+        <SentenceText text={words} />
+      </span>
     </span>
   );
 }
@@ -30,7 +36,9 @@ export function DisagreementKey({ words = 'disagreement' }: { readonly words?: s
         <path d="M0 3h22" stroke="currentColor" strokeWidth="1" strokeDasharray="2 2" />
         <path d="M5 3v8M11 3v5M17 3v9" stroke="currentColor" strokeWidth="1.8" />
       </svg>
-      {words}
+      <span>
+        <SentenceText text={words} />
+      </span>
     </span>
   );
 }

@@ -82,7 +82,7 @@ export function ComparisonPanel({
         </div>
       </header>
       {!comparison && (
-        <p className="text-ink-3 italic">
+        <p className="font-report text-ink-3 italic">
           Nothing is compared yet: choose the trials that this model must stand up to.
         </p>
       )}
@@ -122,7 +122,9 @@ function DrawChart({
   };
   if (choices.length === 0)
     return (
-      <p className="text-ink-3 italic">Nothing varies in these trials, so there is no axis to draw along.</p>
+      <p className="font-report text-ink-3 italic">
+        Nothing varies in these trials, so there is no axis to draw along.
+      </p>
     );
   return (
     <div className="flex flex-wrap items-end gap-3 border-t border-hair pt-4">

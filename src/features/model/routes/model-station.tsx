@@ -118,7 +118,7 @@ function FirstModel({ onStart }: { readonly onStart: (() => void) | null }) {
   return (
     <section className="page-sheet px-7 py-6.5" aria-label="Model">
       <h1 className="font-report text-[24px]/[30px] font-medium">Model</h1>
-      <p className="mt-3 border-t border-hair pt-3 text-ink-3 italic">
+      <p className="mt-3 border-t border-hair pt-3 font-report text-ink-3 italic">
         R = …, the quantity you measure, by those you set and know
       </p>
       {onStart && (

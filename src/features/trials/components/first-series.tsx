@@ -8,8 +8,8 @@ export function FirstSeries({ onStart }: { readonly onStart: () => void }) {
   return (
     <div className="flex flex-wrap items-baseline gap-x-6 gap-y-1 border-t border-rule pt-3 text-ink-3">
       <span className="text-ink">A1</span>
-      <i>say what you hold fixed</i>
-      <i>first reading</i>
+      <i className="font-report text-[17px]">say what you hold fixed</i>
+      <i className="font-report text-[17px]">first reading</i>
       {hasReading ? (
         <Word className="ml-auto" onClick={onStart}>
           New series

@@ -44,7 +44,7 @@ export function SeriesSection({ view, isOpen, onToggle, onChange, onCorrect, onE
         (view.groups.length > 0 ? (
           <TrialsTable view={view} scale={scale} onCorrect={onCorrect} onEnter={onEnter} />
         ) : (
-          <p className="px-7 py-3 text-sm text-ink-3 italic max-sm:px-4">
+          <p className="px-7 py-3 text-sm font-report text-ink-3 italic max-sm:px-4">
             {view.series.letter}1: write the first reading in the bar at the foot.
           </p>
         ))}

@@ -34,7 +34,7 @@ export function Register() {
           ),
         )}
         {quantities.length === 0 && (
-          <li className="border-t-[1.25px] border-ink py-2 text-ink-3 italic">
+          <li className="border-t-[1.25px] border-ink py-2 font-report text-base text-ink-3 italic">
             h, head above the spout, cm: name what you set and what you read
           </li>
         )}
@@ -67,7 +67,9 @@ export function Register() {
           ),
         )}
         {instruments.length === 0 && (
-          <li className="py-1 text-ink-3 italic">steel rule, read to half a millimetre</li>
+          <li className="py-1 font-report text-base text-ink-3 italic">
+            steel rule, read to half a millimetre
+          </li>
         )}
       </ul>
       {isOpen('instrument', null) && <InstrumentForm id={null} onClose={close} />}
