@@ -57,6 +57,7 @@ export const routes: RouteObject[] = [
         errorElement: <ErrorScreen />,
         children: [
           { index: true, lazy: () => import('#src/features/session/routes/sign-in-screen.tsx') },
+          { path: 'copy/:token', lazy: () => import('#src/app/screens/copy-screen.tsx') },
           { lazy: () => import('#src/app/frames/signed-in-frame.tsx'), children: signedInScreens },
           { path: '*', element: <NotFoundScreen /> },
         ],

@@ -1,4 +1,4 @@
-import type { Evidence, Quantity, Series, Trial } from '#shared/evidence/evidence.ts';
+import type { Evidence, Quantity, Trial } from '#shared/evidence/evidence.ts';
 import { findValue } from '#shared/evidence/find-value.ts';
 import type { Findings } from '#shared/evidence/findings.ts';
 import { findingsFromJson } from '#shared/evidence/findings-json.ts';
@@ -119,25 +119,4 @@ function withoutFormerTexts(
     return { ...node, content: (node.content as readonly ReportNode[]).map(clean) };
   };
   return clean(document);
-}
-
-/** The same shapes as evidence has everywhere else, with nothing where a copy has nothing. */
-export function evidenceOfCopy({ evidence }: CopyView): Evidence {
-  return {
-    ...evidence,
-    series: evidence.series satisfies Series[],
-    trials: evidence.trials.map(({ on, excluded, ...trial }) => ({
-      ...trial,
-      by: '',
-      at: `${on}T00:00:00.000Z`,
-      ...(excluded === undefined ? {} : { excluded: { ...excluded, by: '', at: '' } }),
-    })),
-    models: evidence.models.map((model) => ({ ...model, assumptions: [], at: '', by: '' })),
-    claims: evidence.claims.map((claim) => ({ ...claim, declaredAt: '' })),
-  };
-}
-
-/** Findings of a copy, as everything that draws a report takes them. */
-export function findingsOfCopy({ findings }: CopyView): Findings {
-  return { ...findingsFromJson(findings), counts: findings.counts };
 }

@@ -1,4 +1,4 @@
-import { evidenceOfCopy, findingsOfCopy } from '#shared/editions/build-copy-view.ts';
+import { evidenceOfCopy, findingsOfCopy } from '#shared/editions/read-copy-view.ts';
 import { readPictures } from '#server/features/files/service.ts';
 import { pdfFileName, type PdfFile } from '#server/rendering/pdf-file.ts';
 import type { ReadingDeps } from './find-copy.ts';

@@ -6,7 +6,7 @@ import { Katex } from '#src/components/katex.tsx';
 import { SentenceText } from '#src/components/sentence-text.tsx';
 import { Word, WordLink } from '#src/components/word.tsx';
 import { classNames } from '#src/lib/class-names.ts';
-import { timeOfDay } from '#src/lib/dates/say-date.ts';
+import { dayAndMonth, timeOfDay } from '#src/lib/dates/say-date.ts';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
 import { ScalePlot } from './scale-plot.tsx';
@@ -32,12 +32,12 @@ export interface ProvenanceBodyProps {
 /** What a provenance card says, the same on a page, on a chart and on a phone. */
 export function ProvenanceBody({ reference, unit = null, standsIn = null, children }: ProvenanceBodyProps) {
   const { evidence, findings } = useFindingsSnapshot();
-  const { address } = useProblem();
+  const { address, frozen } = useProblem();
   const [trail, setTrail] = useState<readonly ValueReference[]>([]);
   const current = trail.at(-1) ?? reference;
   const card = provenanceOf(current, evidence, findings, trail.length === 0 ? unit : null);
   const since = useFreshSince(keyOf(current) + card.shown.text);
-  const link = card.way === null ? null : wayLink(card.way, address, evidence);
+  const link = card.way === null || frozen ? null : wayLink(card.way, address, evidence);
   const sentences = [card.leftOut, trail.length === 0 ? standsIn : null].filter((s) => s !== null);
   return (
     <div>
@@ -77,7 +77,13 @@ export function ProvenanceBody({ reference, unit = null, standsIn = null, childr
         {trail.length > 0 ? (
           <Word onClick={() => setTrail(trail.slice(0, -1))}>Back</Word>
         ) : (
-          <span>{card.shown.state === 'fresh' ? `Fresh at ${since}` : 'Nothing to show'}</span>
+          <span>
+            {card.shown.state !== 'fresh'
+              ? 'Nothing to show'
+              : frozen
+                ? `As frozen on ${dayAndMonth(frozen.at)}`
+                : `Fresh at ${since}`}
+          </span>
         )}
         {link && <WordLink to={link.to}>{link.words}</WordLink>}
       </div>

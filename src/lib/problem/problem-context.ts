@@ -17,6 +17,12 @@ export interface OpenProblem {
   readonly nextFight: Fight | null;
   /** Evidence and findings of one version, outside React: for node views. */
   readonly store: FindingsStore;
+  /** Set where an edition is read that never changes; its cards lead nowhere else. */
+  readonly frozen?: {
+    /** When it was frozen. */
+    readonly at: Date;
+    readonly addressOfPicture: (sha: string) => string;
+  };
 }
 
 export const ProblemContext = createContext<OpenProblem | null>(null);

@@ -1,6 +1,7 @@
 /** What of an edition a reader gets: the report reads the same, and nothing that it does not reach comes with it. */
 import { describe, expect, test } from 'vitest';
-import { buildCopyView, evidenceOfCopy, findingsOfCopy } from '#shared/editions/build-copy-view.ts';
+import { buildCopyView } from '#shared/editions/build-copy-view.ts';
+import { evidenceOfCopy, findingsOfCopy } from '#shared/editions/read-copy-view.ts';
 import { copyViewSchema } from '#shared/editions/copy-view.ts';
 import type { FrozenEdition } from '#shared/editions/frozen-edition.ts';
 import { evaluate } from '#shared/evidence/evaluate.ts';

@@ -1,14 +1,15 @@
 import { EditorContent, type Editor } from '@tiptap/react';
-import { useCallback, useEffect, useMemo, useRef, useState } from 'react';
-import type { ValueReference } from '#shared/evidence/evidence.ts';
+import { useEffect, useMemo, useRef, useState } from 'react';
 import { blockNumbers } from '#shared/report/block-numbers.ts';
 import { sectionLevels } from '#shared/report/levels.ts';
 import { findSection } from '#shared/report/schema/section-type.ts';
 import { standsInSentence } from '#shared/report/stands-in.ts';
 import { ProvenanceCard } from '#src/components/provenance/provenance-card.tsx';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
-import { useWhere } from '#src/lib/events/use-where.ts';
+import { levelShare } from '#src/components/level.ts';
+import { useHere, useWhere } from '#src/lib/events/use-where.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
+import { firstName } from '#src/lib/say/last-name.ts';
 import { useStationCup } from '#src/lib/station-cup.ts';
 import { useReportEditor } from '../editor/use-report-editor.ts';
 import type { ReportSession, ReportState } from '../session/report-session.ts';
@@ -18,17 +19,8 @@ import { SectionVessels } from './section-vessels.tsx';
 import { SessionNotice } from './session-notice.tsx';
 import { TieList } from './tie-list.tsx';
 import { TitleBlock } from './title-block.tsx';
+import { useOpenCard } from './use-open-card.ts';
 import { useReportDocument } from './use-report-document.ts';
-
-interface OpenCard {
-  readonly reference: ValueReference;
-  readonly unit: string | null;
-  readonly top: number;
-  readonly byKey: boolean;
-  readonly element: HTMLElement;
-}
-
-const CARD_ABOVE_LINE = 34;
 
 /** The page, its vessels, its margin and its sill. */
 export function OpenReport({
@@ -41,16 +33,7 @@ export function OpenReport({
   const { problem, team, mayWrite } = useProblem();
   const { evidence, findings } = useFindingsSnapshot();
   const page = useRef<HTMLElement>(null);
-  const [card, setCard] = useState<OpenCard | null>(null);
-  const openReference = useCallback(
-    (reference: ValueReference, element: HTMLElement, byKey: boolean, unit: string | null = null) => {
-      const frame = page.current?.getBoundingClientRect();
-      if (!frame) return;
-      const { top } = element.getBoundingClientRect();
-      setCard({ reference, unit, byKey, element, top: Math.max(0, top - frame.top - CARD_ABOVE_LINE) });
-    },
-    [],
-  );
+  const { card, openReference, close } = useOpenCard(page);
   const readOnly = state.readOnly || !mayWrite;
   const editor = useReportEditor(session, readOnly, ({ attrs, element, byKey }) =>
     openReference(attrs.ref, element, byKey, attrs.unit),
@@ -62,13 +45,9 @@ export function OpenReport({
   );
   const sections = useMemo(() => sectionLevels(document, evidence, findings), [document, evidence, findings]);
   const notTied = sections.reduce((sum, section) => sum + section.notTied, 0);
+  const here = useHere();
   useWhere(useSectionAtCaret(editor));
   useStationCup('draft');
-  useOpenMark(card?.element ?? null);
-  const close = () => {
-    card?.element.focus({ preventScroll: true });
-    setCard(null);
-  };
   return (
     <ReportPartsContext value={parts}>
       <main id="page" tabIndex={-1} data-region="page" className="report-desk">
@@ -85,7 +64,15 @@ export function OpenReport({
           </div>
           <EditorContent editor={editor} data-region-start />
           {!readOnly && <TieList editor={editor} page={page} />}
-          <SectionVessels page={page} sections={sections} />
+          <SectionVessels
+            page={page}
+            sections={sections.map(({ section, level }) => ({
+              section,
+              share: levelShare(level),
+              words: level,
+              people: here.filter(({ where }) => where === section).map(({ name }) => firstName(name)),
+            }))}
+          />
           {card && (
             <ProvenanceCard
               reference={card.reference}
@@ -102,18 +89,6 @@ export function OpenReport({
       <ReportSill editor={editor} state={{ ...state, readOnly }} notTied={notTied} />
     </ReportPartsContext>
   );
-}
-
-/** The number whose card is open stands on a washed ground. */
-function useOpenMark(element: HTMLElement | null): void {
-  useEffect(() => {
-    element?.classList.add('lv-open');
-    element?.setAttribute('aria-expanded', 'true');
-    return () => {
-      element?.classList.remove('lv-open');
-      element?.setAttribute('aria-expanded', 'false');
-    };
-  }, [element]);
 }
 
 function useSectionAtCaret(editor: Editor): string {

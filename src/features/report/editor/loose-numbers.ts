@@ -14,21 +14,30 @@ const FIRST_LINES: Readonly<Record<SectionName, string>> = {
   Conclusion: 'Answer each verb of the task with a number.',
 };
 
+interface LooseNumbersOptions {
+  readonly getSettings: () => SettingNames;
+  /** Nobody can mend anything here: no first lines, and no advice. */
+  readonly isForReading: boolean;
+}
+
+const LOOSE = 'This number follows no trial.';
+const HOW_TO_TIE = 'Write its symbol and ± to tie it.';
+
 const key = new PluginKey<DecorationSet>('loose numbers');
 
 /** Numbers that follow no trial look unfinished; an empty section shows its first step. */
-export const LooseNumbers = Extension.create<{ getSettings: () => SettingNames }>({
+export const LooseNumbers = Extension.create<LooseNumbersOptions>({
   name: 'looseNumbers',
-  addOptions: () => ({ getSettings: () => new Set<string>() }),
+  addOptions: () => ({ getSettings: () => new Set<string>(), isForReading: false }),
   addProseMirrorPlugins() {
-    const { getSettings } = this.options;
+    const { getSettings, isForReading } = this.options;
+    const decorate = (doc: ProseMirrorNode) => decorations(doc, getSettings(), isForReading);
     return [
       new Plugin<DecorationSet>({
         key,
         state: {
-          init: (_config, { doc }) => decorate(doc, getSettings()),
-          apply: (tr, before) =>
-            tr.docChanged || tr.getMeta(key) === true ? decorate(tr.doc, getSettings()) : before,
+          init: (_config, { doc }) => decorate(doc),
+          apply: (tr, before) => (tr.docChanged || tr.getMeta(key) === true ? decorate(tr.doc) : before),
         },
         props: { decorations: (state) => key.getState(state) },
       }),
@@ -48,7 +57,7 @@ export function looseNumbersOf(
   return key.getState(state)?.find(undefined, undefined, (spec) => spec.isLoose === true) ?? [];
 }
 
-function decorate(doc: ProseMirrorNode, settings: SettingNames): DecorationSet {
+function decorations(doc: ProseMirrorNode, settings: SettingNames, isForReading: boolean): DecorationSet {
   const found: Decoration[] = [];
   doc.descendants((node, position) => {
     if (node.isText) {
@@ -57,7 +66,7 @@ function decorate(doc: ProseMirrorNode, settings: SettingNames): DecorationSet {
           Decoration.inline(
             position + from,
             position + to,
-            { class: 'lv-untied', title: 'This number follows no trial. Write its symbol and ± to tie it.' },
+            { class: 'lv-untied', title: isForReading ? LOOSE : `${LOOSE} ${HOW_TO_TIE}` },
             { isLoose: true },
           ),
         );
@@ -65,7 +74,13 @@ function decorate(doc: ProseMirrorNode, settings: SettingNames): DecorationSet {
     }
     const section = findSection(node.type.name);
     const [only] = node.children;
-    if (section && node.childCount === 1 && only?.type.name === 'paragraph' && only.content.size === 0) {
+    if (
+      !isForReading &&
+      section &&
+      node.childCount === 1 &&
+      only?.type.name === 'paragraph' &&
+      only.content.size === 0
+    ) {
       found.push(
         Decoration.node(position + 1, position + 1 + only.nodeSize, {
           class: 'first-line',

@@ -8,13 +8,14 @@ import { Caption } from './caption.tsx';
 /** A photo or film still, with what it shows for those who cannot see it. */
 export function PlateBlock({ node, editor, updateAttributes, selected }: NodeViewProps) {
   const { anchor, sha, width, height, caption, alt } = node.attrs as PlateAttributes;
-  const { address } = useProblem();
+  const { address, frozen } = useProblem();
+  const own = `/api/teams/${encodeURIComponent(address.team)}/problems/${address.number}/files/${sha}`;
   const number = useNumbers().plates.get(anchor);
   return (
     <NodeViewWrapper as="figure" className="report-figure" id={anchor} data-selected={selected || undefined}>
       <div contentEditable={false}>
         <img
-          src={`/api/teams/${encodeURIComponent(address.team)}/problems/${address.number}/files/${sha}`}
+          src={frozen ? frozen.addressOfPicture(sha) : own}
           width={width}
           height={height}
           alt={alt}
