@@ -31,11 +31,16 @@ const signedInScreens: RouteObject[] = [
         lazy: () => import('#src/app/frames/team-screens-frame.tsx'),
         children: [
           { index: true, lazy: () => import('#src/features/season/routes/season-screen.tsx') },
+          { path: 'copies', lazy: () => import('#src/app/screens/copies-screen.tsx') },
           {
             path: 'new-problem',
             lazy: () => import('#src/features/problem/routes/new-problem-screen.tsx'),
           },
         ],
+      },
+      {
+        path: 'problem/:problem/copies/:copy',
+        lazy: () => import('#src/app/screens/copy-preview-screen.tsx'),
       },
       {
         path: 'problem/:problem',

@@ -13,6 +13,7 @@ export const paths = {
   signIn: (to?: string) => (to === undefined ? '/' : `/?to=${encodeURIComponent(to)}`),
   account: () => '/account',
   season: (team: string) => `/team/${encodeURIComponent(team)}`,
+  copies: (team: string) => `/team/${encodeURIComponent(team)}/copies`,
   newProblem: (team: string) => `/team/${encodeURIComponent(team)}/new-problem`,
   /** Goes on to the station last used. */
   problem,
@@ -29,5 +30,9 @@ export const paths = {
   /** Laid beside the draft, or beside another edition. */
   edition: (at: ProblemAddress, n: number, beside?: number) =>
     `${problem(at)}/editions/${n}${beside === undefined ? '' : `?beside=${beside}`}`,
+  /** What the reader of one of our copies sees. */
+  copyPreview: (at: ProblemAddress, copy: string) => `${problem(at)}/copies/${encodeURIComponent(copy)}`,
+  /** A lent copy, for whoever holds its token. */
+  copy: (token: string) => `/copy/${encodeURIComponent(token)}`,
   settings: (at: ProblemAddress) => `${problem(at)}/settings`,
 };

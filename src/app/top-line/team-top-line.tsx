@@ -1,5 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { Link, useLocation } from 'react-router-dom';
+import { teamCopiesQuery } from '#src/features/copies/api/list-copies.ts';
+import { outCount } from '#src/features/copies/sentences/copy-words.ts';
 import { problemsQuery } from '#src/features/season/api/list-problems.ts';
 import { paths } from '#src/lib/paths.ts';
 import { countOf } from '#src/lib/say/say-number.ts';
@@ -17,6 +19,9 @@ export function TeamTopLine() {
   const { pathname } = useLocation();
   const season = paths.season(team.slug);
   const isSeason = pathname === season;
+  const copies = paths.copies(team.slug);
+  const isCopies = pathname === copies;
+  const { data: lent } = useQuery({ ...teamCopiesQuery(team.slug), enabled: isCopies });
   useDigitKeys([], season);
   return (
     <TopLine
@@ -30,6 +35,12 @@ export function TeamTopLine() {
           words: 'Season',
           isHere: isSeason,
           cup: isSeason && problems ? countOf(problems.length, 'problem') : null,
+        },
+        {
+          to: copies,
+          words: 'Copies',
+          isHere: isCopies,
+          cup: isCopies && lent ? outCount(lent.lent) : null,
         },
       ]}
       others={[{ to: paths.account(), words: `${user.name}, your account` }]}
