@@ -39,7 +39,8 @@ export function OpenCopyPage({ copy, token, addressOfPicture }: OpenCopyPageProp
     () => (evidence ? reportParts(view.document, evidence) : []),
     [view.document, evidence],
   );
-  const shares = useReadShares(page, `read ${view.edition.seal.slice(0, 12)} ${copy.number}`, foot);
+  const name = `copy ${view.edition.seal.slice(0, 12)} ${copy.number}`;
+  const shares = useReadShares(page, `read ${name}`, foot);
   useTitle(view.problem.title, `lent by ${view.team.name}`);
   return (
     <ProblemContext value={open}>
@@ -53,6 +54,7 @@ export function OpenCopyPage({ copy, token, addressOfPicture }: OpenCopyPageProp
       >
         <div className="col-start-2 min-w-0">
           <FrozenReport
+            name={name}
             document={view.document}
             page={page}
             foot={foot}

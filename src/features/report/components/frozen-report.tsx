@@ -11,6 +11,7 @@ import { ProvenanceCard } from '#src/components/provenance/provenance-card.tsx';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
 import { createStore } from '#src/lib/store/create-store.ts';
+import { foldedSections } from '../editor/folded-sections.ts';
 import { LooseNumbers } from '../editor/loose-numbers.ts';
 import type { OpenValue } from '../views/live-value-view.ts';
 import { reportNodeViews } from '../views/report-node-views.ts';
@@ -19,6 +20,8 @@ import { SectionVessels, type VesselledSection } from './section-vessels.tsx';
 import { useOpenCard } from './use-open-card.ts';
 
 interface FrozenReportProps {
+  /** What this browser remembers of it is kept under this name. */
+  readonly name: string;
   readonly document: ReportDocument;
   /** Running head, title block; above the sections. */
   readonly head: ReactNode;
@@ -36,6 +39,7 @@ interface FrozenReportProps {
 
 /** A frozen report, drawn by the same parts as the one that is written, with nothing to write in. */
 export function FrozenReport({
+  name,
   document,
   head,
   sections,
@@ -48,7 +52,7 @@ export function FrozenReport({
   const { problem } = useProblem();
   const { evidence, findings } = useFindingsSnapshot();
   const { card, openReference, close } = useOpenCard(page);
-  const editor = useFrozenEditor(document, extensions, ({ attrs, element, byKey }) =>
+  const editor = useFrozenEditor({ name, document, extensions }, ({ attrs, element, byKey }) =>
     openReference(attrs.ref, element, byKey, attrs.unit),
   );
   useEffect(() => onEditor?.(editor), [editor, onEditor]);
@@ -80,14 +84,14 @@ export function FrozenReport({
 }
 
 function useFrozenEditor(
-  document: ReportDocument,
-  extensions: Extensions,
+  { name, document, extensions }: Required<Pick<FrozenReportProps, 'name' | 'document' | 'extensions'>>,
   onOpen: (value: OpenValue) => void,
 ): Editor {
   const { store } = useProblem();
   const { evidence } = useFindingsSnapshot();
   // The extensions are made once; what they call changes under them.
   const [open] = useState(() => createStore(onOpen));
+  const [folded] = useState(() => foldedSections(name));
   useEffect(() => open.set(onOpen), [open, onOpen]);
   return useEditor(
     {
@@ -97,7 +101,9 @@ function useFrozenEditor(
       // The editor only reads it.
       content: document as unknown as JSONContent,
       extensions: [
-        ...reportExtensions(reportNodeViews(store, (value) => open.get()(value))),
+        ...reportExtensions(
+          reportNodeViews({ store, marks: null, folded, onOpen: (value) => open.get()(value) }),
+        ),
         LooseNumbers.configure({ getSettings: () => settingNames(evidence), isForReading: true }),
         ...extensions,
       ],

@@ -19,7 +19,8 @@ import { TrialsTableBlock } from './trials-table-block.tsx';
 
 interface NodeViewParts {
   readonly store: FindingsStore;
-  readonly marks: ReadingMarks;
+  /** null: nothing here ever moves. */
+  readonly marks: ReadingMarks | null;
   readonly folded: FoldedSections;
   readonly onOpen: (value: OpenValue) => void;
 }
