@@ -83,5 +83,7 @@ export const getHealth = endpoint({
     demo: z
       .array(z.object({ name: z.string(), email: z.string(), passphrase: z.string(), role: roleSchema }))
       .nullable(),
+    /** A lent copy of the demonstration, which anybody may read; null when there is none, or its time is over. */
+    demoCopy: z.object({ token: z.string(), recipient: z.string(), title: z.string() }).nullable(),
   }),
 });

@@ -6,10 +6,11 @@ import { fitsPassphrase } from '#server/features/account/service.ts';
 import { findPicture } from '#server/features/files/service.ts';
 import type { ProblemPlace } from '#server/features/teams/service.ts';
 import type { PdfFile } from '#server/rendering/pdf-file.ts';
-import { findCopy, getOpenCopy, getUnpassedCopy, type CopyVisitor, type ReadingDeps } from './find-copy.ts';
+import { getOpenCopy, getUnpassedCopy, type CopyVisitor, type ReadingDeps } from './find-copy.ts';
 import { printCopy } from './print-copy.ts';
 import type { CopyModel } from './model.ts';
 import { hashCopyToken } from './token.ts';
+import { standingAt } from './standing.ts';
 import { recordView } from './record-view.ts';
 import { viewOf } from './copy-views.ts';
 
@@ -88,14 +89,17 @@ export async function getCopyPdf(deps: ReadingDeps, visitor: CopyVisitor): Promi
 
 /** The copy of the invented demonstration that anybody may try, while it is open; null otherwise. */
 export async function findDemoCopy(
-  deps: Pick<ReadingDeps, 'database' | 'now'>,
+  { database, now }: Pick<ReadingDeps, 'database' | 'now'>,
   token: string,
-): Promise<{ recipient: string; title: string } | null> {
-  const found = await findCopy(deps as ReadingDeps, { token, userId: null, passes: {} });
-  if (found?.standing !== 'open' || found.row.tokenHash !== hashCopyToken(token)) return null;
-  const problem = await deps.database.models.problems.findByPk(found.row.problemId, {
+): Promise<{ token: string; recipient: string; title: string } | null> {
+  const row = await database.models.copies.findOne({
+    where: { tokenHash: hashCopyToken(token) },
+    raw: true,
+  });
+  if (!row || standingAt(row, now()) !== 'open') return null;
+  const problem = await database.models.problems.findByPk(row.problemId, {
     attributes: ['title'],
     raw: true,
   });
-  return problem ? { recipient: found.row.recipient, title: problem.title } : null;
+  return problem ? { token, recipient: row.recipient, title: problem.title } : null;
 }

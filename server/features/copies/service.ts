@@ -14,6 +14,9 @@ import { findBorrowed, findCopies } from './list-copies.ts';
 import type { CopyModel } from './model.ts';
 import { hashCopyToken, newCopyToken } from './token.ts';
 
+export { findDemoCopy } from './read-copy.ts';
+export { hashCopyToken } from './token.ts';
+
 export type CopyDeps = Pick<ServerDeps, 'database' | 'events' | 'now'>;
 
 /** Copies of one problem's editions; everybody of the team may ask. */

@@ -9,6 +9,7 @@ import { demoFights, demoSeason } from './fights.ts';
 import { DEMO_PEOPLE } from './people.ts';
 import { DEMO_PROBLEMS, DEMO_SETTINGS } from './problems.ts';
 import type { DemoProblem } from './problems.ts';
+import { seedCopy } from './seed-copy.ts';
 import { seedEditions } from './seed-editions.ts';
 
 const TEAMS = [
@@ -28,6 +29,7 @@ export async function seedDemo(database: Database, firstStart: Date): Promise<vo
     await insertPeople(database, hashes, firstStart, transaction);
     await insertTeams(database, firstStart, transaction);
     for (const problem of DEMO_PROBLEMS) await insertProblem(database, problem, firstStart, transaction);
+    await seedCopy(database, firstStart, transaction);
   });
 }
 

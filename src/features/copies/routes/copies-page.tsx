@@ -54,7 +54,7 @@ export function CopiesPage({ problems }: { readonly problems: readonly ProblemSu
               <DayScaleHead scale={scale} />
             </CopyHead>
             <ul>
-              {lent.map((copy) => (
+              {lent.toSorted(outFirst).map((copy) => (
                 <CopyRow
                   key={copy.id}
                   copy={copy}
@@ -112,4 +112,9 @@ export function CopiesPage({ problems }: { readonly problems: readonly ProblemSu
       {taking && <TakeBackDialog team={team.slug} copy={taking} onClose={() => setTaking(null)} />}
     </main>
   );
+}
+
+/** What is out stands before what is over; otherwise the newest first, as they come. */
+function outFirst(a: Copy, b: Copy): number {
+  return Number(isOut(b)) - Number(isOut(a));
 }

@@ -4,8 +4,9 @@ import { sayList } from '#src/lib/say/say-list.ts';
 import { sayNumber } from '#src/lib/say/say-number.ts';
 
 /** "opponent, opened 1 March", "reviewer, not opened yet". */
-export function readerWords({ reader, views }: Copy): string {
-  if (views.firstAt === null) return `${reader}, not opened yet`;
+export function readerWords(copy: Copy): string {
+  const { reader, views } = copy;
+  if (views.firstAt === null) return `${reader}, ${isOut(copy) ? 'not opened yet' : 'never opened'}`;
   const times = views.opened === 1 ? 'once' : `${sayNumber(views.opened)} times`;
   const last = new Date(views.lastAt ?? views.firstAt);
   const printed = views.printed > 0 ? ', printed' : '';

@@ -7,6 +7,7 @@ import { sessionQuery } from '#src/lib/session/use-session.ts';
 import { useTitle } from '#src/lib/use-title.ts';
 import { afterSignIn } from '../components/after-sign-in.ts';
 import { CredentialsForm } from '../components/credentials-form.tsx';
+import { DemoCopy } from '../components/demo-copy.tsx';
 import { DemoSignIns } from '../components/demo-sign-ins.tsx';
 import { NoTeam } from '../components/no-team.tsx';
 import { SpoutFigure } from '../components/spout/spout-figure.tsx';
@@ -54,6 +55,7 @@ export function Component() {
           <CredentialsForm onSignedIn={() => undefined} />
           <div className="mt-4.5 border-t border-rule pt-4 empty:hidden">
             <DemoSignIns onSignedIn={() => undefined} />
+            <DemoCopy />
           </div>
         </div>
         <p className="px-5 pb-8 text-xs/[19px] text-ink-3 sm:px-14 lg:absolute lg:top-[744px] lg:right-14 lg:w-[362px] lg:p-0">
