@@ -2,6 +2,7 @@
 import AxeBuilder from '@axe-core/playwright';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { Browser, Page } from 'playwright-core';
+import { DEMO_COPY_TOKEN } from '#server/database/seeders/demo/seed-copy.ts';
 import { DEMO_PEOPLE, openBrowser, person } from '#tests/support/browser.ts';
 import { startApp, type RunningApp } from '#tests/support/running-app.ts';
 
@@ -20,6 +21,7 @@ const SCREENS = [
   ['Edition beside another', `${P}/editions/2?beside=1`],
   ['Editions, none yet', '/team/tern-rock/problem/12/editions'],
   ['Settings', `${P}/settings`],
+  ['Copies', '/team/tern-rock/copies'],
   ['New problem', '/team/tern-rock/new-problem'],
   ['Account', '/account'],
   ['An address that leads nowhere', '/team/tern-rock/problem/77/report'],
@@ -65,6 +67,17 @@ describe.each(['light', 'dark'] as const)('in %s', (theme) => {
   test.each(SCREENS)('%s, 390 px wide', async (_name, path) => {
     expect(await findings(narrow, path, theme)).toEqual([]);
   });
+
+  test.each([1440, 390])(
+    'A lent copy and an address that opens none, signed out, %i px wide',
+    async (width) => {
+      const context = await browser.newContext({ viewport: { width, height: 844 } });
+      const page = await context.newPage();
+      expect(await findings(page, `/copy/${DEMO_COPY_TOKEN}`, theme)).toEqual([]);
+      expect(await findings(page, '/copy/none', theme)).toEqual([]);
+      await context.close();
+    },
+  );
 
   test('Sign in', async () => {
     const context = await browser.newContext();
