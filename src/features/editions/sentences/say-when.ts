@@ -8,7 +8,7 @@ export function frozenWords({ at, by }: Pick<Edition, 'at' | 'by'>): string {
   return `${dayAndShortMonth(moment)}, ${timeOfDay(moment)}, by ${by.replaceAll(' ', NO_BREAK)}`;
 }
 
-/** A name stays on one line. */
+/** A name, and a count with its noun, stay on one line. */
 const NO_BREAK = '\u00A0';
 
 /** "6 pages, 24 trials, 41 tied numbers"; without pages before its PDF was printed. */
@@ -21,5 +21,7 @@ export function figureWords({
     ...(pages === null ? [] : [countOf(pages, 'page')]),
     countOf(trials, 'trial'),
     countOf(tiedNumbers, 'tied number'),
-  ].join(', ');
+  ]
+    .map((figure) => figure.replaceAll(' ', NO_BREAK))
+    .join(', ');
 }
