@@ -94,12 +94,14 @@ export function LendForm({ address, editions, onLent, onClose }: LendFormProps) 
         <Field
           label="From"
           type="datetime-local"
+          className="text-sm"
           error={errors.from?.message}
           {...register('from', moment)}
         />
         <Field
           label="Until"
           type="datetime-local"
+          className="text-sm"
           hint={usual.fight === null ? undefined : `The evening of ${usual.fight}.`}
           error={errors.until?.message}
           {...register('until', moment)}
