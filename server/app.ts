@@ -8,6 +8,7 @@ import { mountCopies } from './features/copies/routes.ts';
 import { mountEditions } from './features/editions/routes.ts';
 import { mountEvidence } from './features/evidence/routes.ts';
 import { mountExports } from './features/exports/routes.ts';
+import { mountFights } from './features/fights/routes.ts';
 import { mountFiles } from './features/files/routes.ts';
 import { mountHealth } from './features/health/routes.ts';
 import { mountProblems } from './features/problems/routes.ts';
@@ -40,6 +41,7 @@ export function createApp(deps: ServerDeps): Express {
   mountSession(app, deps);
   mountAccount(app, deps);
   mountTeams(app, deps);
+  mountFights(app, deps);
   mountProblems(app, deps);
   mountEvidence(app, deps);
   mountTrials(app, deps);

@@ -9,6 +9,7 @@ import {
 } from '#server/features/copies/model.ts';
 import { defineEditions } from '#server/features/editions/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
+import { defineEvents } from '#server/features/fights/model.ts';
 import { defineFiles } from '#server/features/files/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
 import { defineReportDocs, defineReportUpdates } from '#server/features/report/model.ts';
@@ -25,6 +26,7 @@ export function defineModels(sequelize: Sequelize) {
     teams: defineTeams(sequelize),
     memberships: defineMemberships(sequelize),
     fights: defineFights(sequelize),
+    events: defineEvents(sequelize),
     problems: defineProblems(sequelize),
     tasks: defineTasks(sequelize),
     definitions: defineAllDefinitions(sequelize),

@@ -43,11 +43,15 @@ export const fightSchema = z.object({
   place: z.string().optional(),
   /** Result in words, once it is over. */
   result: z.string().optional(),
+  /** The team's event by whose settings it is held. */
+  event: idSchema.optional(),
   stages: z.array(
     z.object({
       role: z.enum(['report', 'oppose', 'review']),
       problem: z.number().int(),
       against: z.string().optional(),
+      /** Id of who takes the stage. */
+      person: z.string().optional(),
     }),
   ),
 });

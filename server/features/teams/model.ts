@@ -55,6 +55,8 @@ export interface FightModel extends Model<InferAttributes<FightModel>, InferCrea
   result: CreationOptional<string | null>;
   /** JSON of the contract's stages. */
   stages: string;
+  eventId: CreationOptional<string | null>;
+  rowVersion: CreationOptional<number>;
 }
 
 export function defineFights(sequelize: Sequelize) {
@@ -66,6 +68,8 @@ export function defineFights(sequelize: Sequelize) {
     place: DataTypes.STRING,
     result: DataTypes.STRING,
     stages: DataTypes.TEXT,
+    eventId: DataTypes.STRING,
+    rowVersion: { type: DataTypes.INTEGER, defaultValue: 1 },
   });
 }
 
@@ -77,5 +81,6 @@ export function toFight(row: FightModel): Fight {
     stages: JSON.parse(row.stages),
     ...(row.place === null ? {} : { place: row.place }),
     ...(row.result === null ? {} : { result: row.result }),
+    ...(row.eventId === null ? {} : { event: row.eventId }),
   });
 }

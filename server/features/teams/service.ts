@@ -7,6 +7,8 @@ import { notFound } from '#server/errors/refusals.ts';
 import type { OpenSockets } from '#server/sockets/open-sockets.ts';
 import { toFight } from './model.ts';
 
+export { toFight } from './model.ts';
+
 /** A team as one of its people sees it. */
 export interface TeamPlace {
   readonly team: { readonly id: string; readonly slug: string };

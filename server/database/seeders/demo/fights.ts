@@ -1,3 +1,6 @@
+import exampleEvent from '#templates/events/example-a.json' with { type: 'json' };
+import { eventSchema } from '#shared/talk/event.ts';
+import type { Event } from '#shared/talk/event.ts';
 import type { Fight } from '#shared/contracts/teams.ts';
 
 const DAY = 86_400_000;
@@ -6,6 +9,13 @@ const DAY = 86_400_000;
 function morning(firstStart: Date, days: number): string {
   const day = new Date(firstStart.getTime() + days * DAY);
   return new Date(Date.UTC(day.getUTCFullYear(), day.getUTCMonth(), day.getUTCDate(), 9, 30)).toISOString();
+}
+
+export const DEMO_EVENT_ID = 'demo-event-a';
+
+/** The event by whose settings the invented fights are held. */
+export function demoEvent(): Event {
+  return eventSchema.parse(exampleEvent);
 }
 
 /** The invented season: one fight over, the next in eleven days. */
@@ -18,9 +28,9 @@ export function demoFights(firstStart: Date): Fight[] {
       place: 'Skerry University, hall 2',
       result: '2nd of 3',
       stages: [
-        { role: 'report', problem: 4, against: 'Gannet Bank' },
-        { role: 'oppose', problem: 1, against: 'Cormorant Head' },
-        { role: 'review', problem: 9 },
+        { role: 'report', problem: 4, against: 'Gannet Bank', person: 'demo-maren' },
+        { role: 'oppose', problem: 1, against: 'Cormorant Head', person: 'demo-kasimir' },
+        { role: 'review', problem: 9, person: 'demo-petra' },
       ],
     },
     {
@@ -29,9 +39,9 @@ export function demoFights(firstStart: Date): Fight[] {
       at: morning(firstStart, 11),
       place: 'Gannet Bank, old boathouse',
       stages: [
-        { role: 'report', problem: 1, against: 'Gannet Bank' },
-        { role: 'oppose', problem: 6, against: 'Cormorant Head' },
-        { role: 'review', problem: 4 },
+        { role: 'report', problem: 1, against: 'Gannet Bank', person: 'demo-ines' },
+        { role: 'oppose', problem: 6, against: 'Cormorant Head', person: 'demo-kasimir' },
+        { role: 'review', problem: 4, person: 'demo-maren' },
       ],
     },
     { id: 'demo-fight-3', name: 'Fight 3', at: morning(firstStart, 46), stages: [] },

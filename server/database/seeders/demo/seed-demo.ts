@@ -5,7 +5,7 @@ import type { Database } from '#server/database/database.ts';
 import { hashPassphrase } from '#server/features/account/passphrase.ts';
 import { storeEvidence } from '#server/features/evidence/store-evidence.ts';
 import { seedReport } from '#server/features/report/service.ts';
-import { demoFights, demoSeason } from './fights.ts';
+import { DEMO_EVENT_ID, demoEvent, demoFights, demoSeason } from './fights.ts';
 import { DEMO_PEOPLE } from './people.ts';
 import { DEMO_PROBLEMS, DEMO_SETTINGS } from './problems.ts';
 import type { DemoProblem } from './problems.ts';
@@ -52,7 +52,7 @@ async function insertPeople(
 }
 
 async function insertTeams(database: Database, firstStart: Date, transaction: Transaction): Promise<void> {
-  const { teams, memberships, fights } = database.models;
+  const { teams, memberships, fights, events } = database.models;
   const { from, to } = demoSeason(firstStart);
   await teams.bulkCreate(
     TEAMS.map((team) => ({ ...team, isDemo: true, seasonFrom: from, seasonTo: to })),
@@ -67,6 +67,10 @@ async function insertTeams(database: Database, firstStart: Date, transaction: Tr
     })),
     { transaction },
   );
+  await events.create(
+    { id: DEMO_EVENT_ID, teamId: TEAMS[0].id, content: JSON.stringify(demoEvent()) },
+    { transaction },
+  );
   await fights.bulkCreate(
     demoFights(firstStart).map((fight) => ({
       id: fight.id,
@@ -76,6 +80,7 @@ async function insertTeams(database: Database, firstStart: Date, transaction: Tr
       place: fight.place ?? null,
       result: fight.result ?? null,
       stages: JSON.stringify(fight.stages),
+      eventId: DEMO_EVENT_ID,
     })),
     { transaction },
   );
