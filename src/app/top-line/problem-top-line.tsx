@@ -4,7 +4,7 @@ import { daysBetween, inDays } from '#src/lib/dates/say-date.ts';
 import { useEvidence } from '#src/lib/evidence/use-evidence.ts';
 import { paths, STATIONS, type Station } from '#src/lib/paths.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { stationCup } from '#src/lib/station-cup.ts';
 import { useStore } from '#src/lib/store/use-store.ts';
 import { useDigitKeys } from '../keys/use-digit-keys.ts';

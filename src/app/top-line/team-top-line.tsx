@@ -4,7 +4,7 @@ import { teamCopiesQuery } from '#src/features/copies/api/list-copies.ts';
 import { outCount } from '#src/features/copies/sentences/copy-words.ts';
 import { problemsQuery } from '#src/features/season/api/list-problems.ts';
 import { paths } from '#src/lib/paths.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { useSession } from '#src/lib/session/use-session.ts';
 import { useTeam } from '#src/lib/team/team-context.ts';
 import { useDigitKeys } from '../keys/use-digit-keys.ts';

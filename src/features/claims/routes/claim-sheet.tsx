@@ -9,7 +9,7 @@ import { useEvidence, useFindingsSnapshot } from '#src/lib/evidence/use-evidence
 import { paths } from '#src/lib/paths.ts';
 import { useProblem } from '#src/lib/problem/problem-context.ts';
 import { sayList } from '#src/lib/say/say-list.ts';
-import { sayNumber } from '#src/lib/say/say-number.ts';
+import { countInWords } from '#shared/evidence/words.ts';
 import { useStationCup } from '#src/lib/station-cup.ts';
 import { ClaimForm } from '../components/claim-form.tsx';
 import { ClaimScale } from '../components/claim-scale.tsx';
@@ -142,7 +142,7 @@ function countSentence(findings: readonly ClaimFinding[]): string {
       Leaks: one ? 'leaks' : 'leak',
       Undecided: one ? 'is undecided' : 'are undecided',
     }[verdict];
-    return [`${sayNumber(count)} ${does}`];
+    return [`${countInWords(count)} ${does}`];
   });
   const sentence = sayList(words);
   return `${sentence.charAt(0).toUpperCase()}${sentence.slice(1)}.`;

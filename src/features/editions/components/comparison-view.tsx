@@ -1,7 +1,7 @@
 import type { EditionComparison } from '#shared/editions/edition-comparison.ts';
 import type { ProblemAddress } from '#src/lib/problem/problem-address.ts';
 import { sayList } from '#src/lib/say/say-list.ts';
-import { sayNumber } from '#src/lib/say/say-number.ts';
+import { countInWords } from '#shared/evidence/words.ts';
 import { MovedSentence, MovedValueLine, MovedVerdictLine } from './moved-value-line.tsx';
 import { PassageList } from './passage-list.tsx';
 
@@ -54,8 +54,8 @@ export function ComparisonView({ address, comparison }: ComparisonViewProps) {
 /** "Nine numbers were tied, one is no longer in the report."; null when the same ones are tied. */
 function tiedSentence({ newlyTied, noLongerTied }: EditionComparison): string | null {
   const parts = [
-    ...(newlyTied > 0 ? [`${sayNumber(newlyTied)} tied ${numbers(newlyTied)} came`] : []),
-    ...(noLongerTied > 0 ? [`${sayNumber(noLongerTied)} tied ${numbers(noLongerTied)} went`] : []),
+    ...(newlyTied > 0 ? [`${countInWords(newlyTied)} tied ${numbers(newlyTied)} came`] : []),
+    ...(noLongerTied > 0 ? [`${countInWords(noLongerTied)} tied ${numbers(noLongerTied)} went`] : []),
   ];
   if (parts.length === 0) return null;
   const sentence = sayList(parts);

@@ -7,7 +7,7 @@ import { useEvidence } from '#src/lib/evidence/use-evidence.ts';
 import { paths } from '#src/lib/paths.ts';
 import type { ProblemAddress } from '#src/lib/problem/problem-address.ts';
 import { sayList } from '#src/lib/say/say-list.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { comparisonQuery } from '../api/compare-editions.ts';
 import { MovedSentence, MovedValueLine, MovedVerdictLine } from './moved-value-line.tsx';
 

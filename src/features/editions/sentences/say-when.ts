@@ -1,6 +1,6 @@
 import type { Edition } from '#shared/contracts/editions.ts';
 import { dayAndShortMonth, timeOfDay } from '#src/lib/dates/say-date.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 
 /** "28 Feb, 17:40, by Ines Farrow" */
 export function frozenWords({ at, by }: Pick<Edition, 'at' | 'by'>): string {

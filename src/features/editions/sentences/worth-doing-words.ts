@@ -2,7 +2,7 @@ import type { WorthDoing } from '#shared/editions/worth-doing.ts';
 import { paths } from '#src/lib/paths.ts';
 import type { ProblemAddress } from '#src/lib/problem/problem-address.ts';
 import { sayList } from '#src/lib/say/say-list.ts';
-import { sayNumber } from '#src/lib/say/say-number.ts';
+import { countInWords } from '#shared/evidence/words.ts';
 
 /** One thing worth doing: the linked words, and what follows them. */
 export interface Worth {
@@ -16,7 +16,7 @@ export interface Worth {
 export function worthDoingWords(address: ProblemAddress, worth: WorthDoing): Worth[] {
   const tie = worth.notTied.map(({ section, count }) => ({
     key: `tie-${section}`,
-    linked: `tie ${sayNumber(count)} ${count === 1 ? 'number' : 'numbers'}`,
+    linked: `tie ${countInWords(count)} ${count === 1 ? 'number' : 'numbers'}`,
     after: ` in section ${section}`,
     to: paths.report(address, section),
   }));

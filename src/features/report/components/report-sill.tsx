@@ -1,7 +1,7 @@
 import type { Editor } from '@tiptap/react';
 import { SillBar, SillSentence } from '#src/components/sill.tsx';
 import { timeOfDay } from '#src/lib/dates/say-date.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { looseNumbersOf } from '../editor/loose-numbers.ts';
 import type { ReportState } from '../session/report-session.ts';
 import { PutInWords } from './put-in-words.tsx';

@@ -1,5 +1,5 @@
 import type { Node } from '@tiptap/pm/model';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { sayList } from '#src/lib/say/say-list.ts';
 
 /** Node types that are counted, in the order they are told. */

@@ -1,7 +1,7 @@
 import type { Role } from '#shared/contracts/session.ts';
 import type { ProblemSummary } from '#shared/contracts/teams.ts';
 import { paths } from '#src/lib/paths.ts';
-import { sayNumber } from '#src/lib/say/say-number.ts';
+import { countInWords } from '#shared/evidence/words.ts';
 
 /** One thing that waits for a person: `before`, the linked words, `after`. */
 export interface Waiting {
@@ -32,12 +32,12 @@ function thingsIn(team: string, problem: ProblemSummary): Waiting[] {
   const { title, notTied, claims, trials } = problem;
   const things: Waiting[] = [];
   if (notTied > 0) {
-    const linked = notTied === 1 ? 'one number' : `${sayNumber(notTied)} numbers`;
+    const linked = notTied === 1 ? 'one number' : `${countInWords(notTied)} numbers`;
     const after = ` in ${title} ${notTied === 1 ? 'is' : 'are'} not tied`;
     things.push({ key: `tie-${problem.number}`, before: '', linked, after, to: paths.report(address) });
   }
   if (claims.leaks > 0) {
-    const linked = claims.leaks === 1 ? 'one claim' : `${sayNumber(claims.leaks)} claims`;
+    const linked = claims.leaks === 1 ? 'one claim' : `${countInWords(claims.leaks)} claims`;
     const after = ` in ${title} ${claims.leaks === 1 ? 'leaks' : 'leak'}`;
     things.push({ key: `leak-${problem.number}`, before: '', linked, after, to: paths.claims(address) });
   }
@@ -51,7 +51,7 @@ function thingsIn(team: string, problem: ProblemSummary): Waiting[] {
       to,
     });
   } else if (claims.undecided > 0 && claims.leaks === 0) {
-    const linked = claims.undecided === 1 ? 'one claim' : `${sayNumber(claims.undecided)} claims`;
+    const linked = claims.undecided === 1 ? 'one claim' : `${countInWords(claims.undecided)} claims`;
     const after = ` in ${title} ${claims.undecided === 1 ? 'is' : 'are'} undecided`;
     things.push({ key: `claim-${problem.number}`, before: '', linked, after, to: paths.claims(address) });
   }

@@ -4,7 +4,7 @@ import { Button } from '#src/components/button.tsx';
 import { SillSentence } from '#src/components/sill.tsx';
 import { Word } from '#src/components/word.tsx';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { entryFields, firstText, readEntry, uncertaintyKey, type EntryText } from '../view/next-trial.ts';
 import type { SeriesView, TrialLine } from '../view/series-view.ts';
 import { EntryField } from './entry-field.tsx';

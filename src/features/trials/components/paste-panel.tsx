@@ -4,7 +4,7 @@ import { Button } from '#src/components/button.tsx';
 import { Notice } from '#src/components/notice.tsx';
 import { TextArea } from '#src/components/text-area.tsx';
 import { useEvidence } from '#src/lib/evidence/use-evidence.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { say } from '#src/lib/sill-store.ts';
 import { entryFields } from '../view/next-trial.ts';
 import { readPastedBlock, type PastedBlock } from '../view/pasted-block.ts';

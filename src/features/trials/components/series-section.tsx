@@ -5,7 +5,7 @@ import { parseUnit } from '#shared/units/parse-unit.ts';
 import { QuantitySymbol } from '#src/components/quantity-symbol.tsx';
 import { Word } from '#src/components/word.tsx';
 import { useEvidence } from '#src/lib/evidence/use-evidence.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { sharedScale } from '../view/shared-scale.ts';
 import { showTyped } from '../view/show-typed.ts';
 import type { SeriesView, TrialLine } from '../view/series-view.ts';

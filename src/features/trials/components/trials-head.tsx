@@ -1,6 +1,7 @@
 import { MeasuredKey, PredictedKey } from '#src/components/legend-keys.tsx';
 import { daysBetween, dayAndMonth, timeOfDay } from '#src/lib/dates/say-date.ts';
-import { countOf, sayNumber } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
+import { countInWords } from '#shared/evidence/words.ts';
 import { useEvidence } from '#src/lib/evidence/use-evidence.ts';
 import type { Trial } from '#shared/evidence/evidence.ts';
 
@@ -27,7 +28,7 @@ export function stateSentence(trials: readonly Trial[], now: Date): string {
   if (trials.length === 0) return 'No trial is logged yet.';
   const excluded = trials.filter((trial) => trial.excluded).length;
   const last = new Date(Math.max(...trials.map((trial) => Date.parse(trial.at))));
-  const number = sayNumber(excluded);
+  const number = countInWords(excluded);
   const first =
     excluded === 0
       ? `${countOf(trials.length, 'trial')}, none excluded.`
