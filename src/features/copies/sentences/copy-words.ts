@@ -1,13 +1,13 @@
 import type { BorrowedCopy, Copy } from '#shared/contracts/copies.ts';
 import { dayAndMonth, dayAndShortMonth, timeOfDay } from '#src/lib/dates/say-date.ts';
 import { sayList } from '#src/lib/say/say-list.ts';
-import { sayNumber } from '#src/lib/say/say-number.ts';
+import { countInWords } from '#shared/evidence/words.ts';
 
 /** "opponent, opened 1 March", "reviewer, not opened yet". */
 export function readerWords(copy: Copy): string {
   const { reader, views } = copy;
   if (views.firstAt === null) return `${reader}, ${isOut(copy) ? 'not opened yet' : 'never opened'}`;
-  const times = views.opened === 1 ? 'once' : `${sayNumber(views.opened)} times`;
+  const times = views.opened === 1 ? 'once' : `${countInWords(views.opened)} times`;
   const last = new Date(views.lastAt ?? views.firstAt);
   const printed = views.printed > 0 ? ', printed' : '';
   return `${reader}, opened ${times}${printed}, last ${dayAndShortMonth(last)}, ${timeOfDay(last)}`;
@@ -38,11 +38,11 @@ export function outSentence(lent: readonly Copy[]): string {
   const out = lent.filter(isOut);
   if (out.length === 0) return 'No copy of ours is out.';
   const opened = out.filter(({ views }) => views.opened > 0).length;
-  const count = capital(sayNumber(out.length));
+  const count = capital(countInWords(out.length));
   const first = out.length === 1 ? 'One copy of ours is out' : `${count} copies of ours are out`;
   if (opened === 0) return `${first}, none has been opened yet.`;
   if (opened === out.length) return `${first}, ${out.length === 1 ? 'and has' : 'all have'} been opened.`;
-  return `${first}, ${sayNumber(opened)} ${opened === 1 ? 'has' : 'have'} been opened.`;
+  return `${first}, ${countInWords(opened)} ${opened === 1 ? 'has' : 'have'} been opened.`;
 }
 
 /** "Long Skerry lends us Braked Magnet."; null: nobody lends us anything. */

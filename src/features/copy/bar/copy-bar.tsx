@@ -3,7 +3,7 @@ import { Mark } from '#src/components/mark.tsx';
 import { Seal } from '#src/components/seal.tsx';
 import { addressOf } from '#src/lib/api/address-of.ts';
 import { dayAndMonth, timeOfDay, weekdayDayAndMonth } from '#src/lib/dates/say-date.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 
 interface CopyBarProps {
   readonly copy: OpenCopy;

@@ -5,7 +5,7 @@ import { Notice } from '#src/components/notice.tsx';
 import { Sheet } from '#src/components/sheet.tsx';
 import { Word } from '#src/components/word.tsx';
 import { sentenceOf } from '#src/lib/api/api-error.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { useMedia } from '#src/lib/use-media.ts';
 import { useQuestionStep } from '../api/questions.ts';
 import { showPassages } from '../passages/asked-passages.ts';

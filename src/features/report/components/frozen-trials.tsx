@@ -1,6 +1,6 @@
 import { trialsTable } from '#shared/report/trials-table.ts';
 import { useFindingsSnapshot } from '#src/lib/evidence/use-evidence.ts';
-import { countOf } from '#src/lib/say/say-number.ts';
+import { countOf } from '#src/lib/say/count-of.ts';
 import { dayAndMonth } from '#src/lib/dates/say-date.ts';
 import { SeriesTable } from '../views/series-table.tsx';
 
