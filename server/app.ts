@@ -11,6 +11,7 @@ import { mountExports } from './features/exports/routes.ts';
 import { mountFights } from './features/fights/routes.ts';
 import { mountFiles } from './features/files/routes.ts';
 import { mountHealth } from './features/health/routes.ts';
+import { mountLeaks } from './features/leaks/routes.ts';
 import { mountProblems } from './features/problems/routes.ts';
 import { mountReport } from './features/report/routes.ts';
 import { mountSession } from './features/session/routes.ts';
@@ -50,6 +51,7 @@ export function createApp(deps: ServerDeps): Express {
   mountExports(app, deps);
   mountEditions(app, deps);
   mountCopies(app, deps);
+  mountLeaks(app, deps);
 
   app.use('/api', () => {
     throw notFound();

@@ -12,6 +12,7 @@ const problemScreens: RouteObject[] = [
   { path: 'model/claims', lazy: () => import('#src/app/screens/claims-screen.tsx') },
   { path: 'model/:n', lazy: () => import('#src/app/screens/model-screen.tsx') },
   { path: 'report', lazy: () => import('#src/app/screens/report-screen.tsx') },
+  { path: 'leaks', lazy: () => import('#src/app/screens/leaks-screen.tsx') },
   { path: 'editions', lazy: () => import('#src/app/screens/editions-screen.tsx') },
   { path: 'editions/:n', lazy: () => import('#src/app/screens/edition-screen.tsx') },
   { path: 'editions/:n/print', lazy: () => import('#src/app/screens/edition-print.ts') },

@@ -54,6 +54,7 @@ export function createReportEditing(deps: ServerDeps, compactions: Compactions):
       await compactions.run(place.problem.id, () =>
         compactReport(deps.database, place.problem.id, deps.now()),
       );
+      deps.events.publishStale(place, 'report', place.problem.number);
       deps.events.publishStale(place, 'problems');
     },
     async beforeHandleAwareness({ context, states }) {

@@ -11,6 +11,7 @@ import { defineEditions } from '#server/features/editions/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
 import { defineEvents } from '#server/features/fights/model.ts';
 import { defineFiles } from '#server/features/files/model.ts';
+import { defineLeakAnswers, defineLeakMarks } from '#server/features/leaks/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
 import { defineReportDocs, defineReportUpdates } from '#server/features/report/model.ts';
 import { defineSessions } from '#server/features/session/model.ts';
@@ -34,6 +35,8 @@ export function defineModels(sequelize: Sequelize) {
     auditEvents: defineAuditEvents(sequelize),
     reportDocs: defineReportDocs(sequelize),
     files: defineFiles(sequelize),
+    leakAnswers: defineLeakAnswers(sequelize),
+    leakMarks: defineLeakMarks(sequelize),
     reportUpdates: defineReportUpdates(sequelize),
     editions: defineEditions(sequelize),
     copies: defineCopies(sequelize),

@@ -1,7 +1,7 @@
 import type { ProblemAddress } from './problem/problem-address.ts';
 
 /** A problem's stations in their order; the digit keys follow it. */
-export const STATIONS = ['trials', 'model', 'report', 'editions'] as const;
+export const STATIONS = ['trials', 'model', 'report', 'leaks', 'editions'] as const;
 export type Station = (typeof STATIONS)[number];
 
 function problem({ team, number }: ProblemAddress): string {

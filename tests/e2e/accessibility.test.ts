@@ -13,6 +13,8 @@ const SCREENS = [
   ['Model', `${P}/model`],
   ['Claim sheet', `${P}/model/claims`],
   ['Report', `${P}/report`],
+  ['Leak check', `${P}/leaks`],
+  ['Leak check, first day', '/team/tern-rock/problem/12/leaks'],
   ['Report, first day', '/team/tern-rock/problem/12/report'],
   ['Trials, none yet', '/team/tern-rock/problem/12/trials'],
   ['Model, none yet', '/team/tern-rock/problem/12/model'],

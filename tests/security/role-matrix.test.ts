@@ -84,6 +84,8 @@ const MATRIX: Readonly<Record<string, string>> = {
   [`GET ${P}/exports/:export`]: 'team reads',
   [`DELETE ${P}/exports/:export`]: 'team reads',
   [`GET ${P}/exports/:export/file`]: 'team reads',
+  [`GET ${P}/leaks`]: 'team reads',
+  [`PUT ${P}/leaks/:leak/answer`]: 'team writes',
   [`GET ${P}/editions`]: 'team reads',
   [`POST ${P}/editions`]: 'captain only',
   [`GET ${P}/editions/:n`]: 'team reads',

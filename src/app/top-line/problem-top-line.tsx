@@ -17,6 +17,7 @@ const WORDS: Readonly<Record<Station, string>> = {
   trials: 'Trials',
   model: 'Model',
   report: 'Report',
+  leaks: 'Leak check',
   editions: 'Editions',
 };
 
@@ -71,7 +72,7 @@ function usualCup(station: Station, evidence: Evidence): string | null {
   if (station === 'trials')
     return countOf(evidence.trials.filter(({ withdrawn }) => !withdrawn).length, 'trial');
   if (station === 'report') return 'draft';
-  if (station === 'editions') return null;
+  if (station === 'leaks' || station === 'editions') return null;
   const newest = Math.max(0, ...evidence.models.map(({ n }) => n));
   return newest === 0 ? 'no model yet' : `model ${newest}`;
 }

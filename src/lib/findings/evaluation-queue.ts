@@ -1,11 +1,15 @@
 import type { Evidence } from '#shared/evidence/evidence.ts';
 import type { Findings } from '#shared/evidence/findings.ts';
+import type { Leak } from '#shared/leaks/leak.ts';
+import type { ReportDocument } from '#shared/report/schema/report-node.ts';
 import type { EvidenceData } from '#src/lib/evidence/evidence-query.ts';
 import type { RunningEngine } from './start-engine.ts';
 
 export interface EvaluationQueue {
   /** Takes the newest evidence. Evaluations never overlap, and what is overtaken is left out. */
   feed(data: EvidenceData): void;
+  /** Leaks of what was evaluated last; null while nothing was. */
+  leaks(document: ReportDocument): Promise<readonly Leak[] | null>;
   /** Stops the engine; nothing more is published. */
   stop(): void;
 }
@@ -66,6 +70,11 @@ export function createEvaluationQueue(
       if (data.evidence === (waiting?.evidence ?? held)) return;
       waiting = data;
       void work();
+    },
+    async leaks(document) {
+      if (!running || !held) return null;
+      const { engine } = await running;
+      return engine.leaks(document);
     },
     stop() {
       isStopped = true;

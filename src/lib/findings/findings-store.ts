@@ -1,6 +1,8 @@
 import type { Evidence, ValueReference } from '#shared/evidence/evidence.ts';
 import { findValue } from '#shared/evidence/find-value.ts';
 import type { Fault, Findings, Scalar } from '#shared/evidence/findings.ts';
+import type { Leak } from '#shared/leaks/leak.ts';
+import type { ReportDocument } from '#shared/report/schema/report-node.ts';
 import type { EvidenceData } from '#src/lib/evidence/evidence-query.ts';
 import { createEvaluationQueue, type EvaluationQueue } from './evaluation-queue.ts';
 import { sameValue } from './same-value.ts';
@@ -25,6 +27,8 @@ export interface FindingsStore {
   find(reference: ValueReference): Value;
   /** Hears only when the value of this reference has become another one. */
   subscribeTo(reference: ValueReference, listener: (value: Value) => void): () => void;
+  /** Where an opponent will press, found beside the page; null before the first findings. */
+  leaks(document: ReportDocument): Promise<readonly Leak[] | null>;
   /** Takes the newest evidence, while the store is open. */
   feed(data: EvidenceData): void;
   /** Begins to work; a store may be closed and opened again. */
@@ -73,6 +77,7 @@ export function createFindingsStore(start: () => Promise<RunningEngine>): Findin
       watches.add(watch);
       return () => watches.delete(watch);
     },
+    leaks: (document) => queue?.leaks(document) ?? Promise.resolve(null),
     feed: (data) => queue?.feed(data),
     open() {
       queue ??= createEvaluationQueue(start, {

@@ -10,6 +10,8 @@ export function createFrozenFindings(evidence: Evidence, findings: Findings): Fi
   return {
     get: () => snapshot,
     failure: () => null,
+    // Leaks are the team's own business and never in a copy.
+    leaks: () => Promise.resolve(null),
     subscribe: () => nothing,
     find: (reference) => findValue(findings, evidence, reference),
     subscribeTo: () => nothing,

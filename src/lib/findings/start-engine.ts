@@ -1,6 +1,7 @@
 import { wrap } from 'comlink';
 import workerAddress from 'virtual:findings-worker';
 import type { Findings } from '#shared/evidence/findings.ts';
+import type { Leak } from '#shared/leaks/leak.ts';
 import type { FindingsEngine } from './findings-engine.ts';
 
 export interface RunningEngine {
@@ -27,6 +28,7 @@ export async function startEngine(): Promise<RunningEngine> {
     engine: {
       load: (evidence) => Promise.race<Findings>([remote.load(evidence), broken]),
       follow: (steps) => Promise.race<Findings>([remote.follow(steps), broken]),
+      leaks: (document) => Promise.race<readonly Leak[]>([remote.leaks(document), broken]),
     },
     stop: () => worker.terminate(),
   };

@@ -48,6 +48,7 @@ function heldEngine() {
       calls.push(`follow ${steps.map(({ version }) => version).join(' ')}`);
       return wait(steps.at(-1)?.version ?? 0);
     },
+    leaks: () => [],
   };
 }
 

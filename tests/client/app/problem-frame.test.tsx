@@ -75,6 +75,7 @@ test('problem, when it is opened the first time: begins at Trials, with its coun
     'Trials1 trial',
     'Model',
     'Report',
+    'Leak check',
     'Editions',
   ]);
   expect(stations.getByRole('link', { name: /Trials/ }).getAttribute('aria-current')).toBe('page');
