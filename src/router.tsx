@@ -32,6 +32,7 @@ const signedInScreens: RouteObject[] = [
         lazy: () => import('#src/app/frames/team-screens-frame.tsx'),
         children: [
           { index: true, lazy: () => import('#src/features/season/routes/season-screen.tsx') },
+          { path: 'fights', lazy: () => import('#src/app/screens/fights-screen.tsx') },
           { path: 'copies', lazy: () => import('#src/app/screens/copies-screen.tsx') },
           {
             path: 'new-problem',

@@ -26,6 +26,8 @@ export const STALE = [
   'leaks',
   'slides',
   'invitations',
+  'fights',
+  'events',
   'outbox',
 ] as const;
 export type Stale = (typeof STALE)[number];

@@ -13,6 +13,7 @@ export const paths = {
   signIn: (to?: string) => (to === undefined ? '/' : `/?to=${encodeURIComponent(to)}`),
   account: () => '/account',
   season: (team: string) => `/team/${encodeURIComponent(team)}`,
+  fights: (team: string) => `/team/${encodeURIComponent(team)}/fights`,
   copies: (team: string) => `/team/${encodeURIComponent(team)}/copies`,
   newProblem: (team: string) => `/team/${encodeURIComponent(team)}/new-problem`,
   /** Goes on to the station last used. */

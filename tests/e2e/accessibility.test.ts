@@ -13,6 +13,7 @@ const SCREENS = [
   ['Model', `${P}/model`],
   ['Claim sheet', `${P}/model/claims`],
   ['Report', `${P}/report`],
+  ['Fights and events', '/team/tern-rock/fights'],
   ['Leak check', `${P}/leaks`],
   ['Leak check, first day', '/team/tern-rock/problem/12/leaks'],
   ['Report, first day', '/team/tern-rock/problem/12/report'],

@@ -33,8 +33,11 @@ function forgetStale(client: QueryClient, event: Extract<ServerEvent, { type: 's
   const { team, what, number } = event;
   const forget = (queryKey: readonly unknown[], exact = true) =>
     void client.invalidateQueries({ queryKey, exact });
-  if (what === 'team') forget(queryKeys.team(team));
-  else if (number === undefined) forget(queryKeys.ofTeam(team, what), what === 'problems');
+  if (what === 'team') {
+    forget(queryKeys.team(team));
+    forget(queryKeys.ofTeam(team, 'fights'));
+    forget(queryKeys.ofTeam(team, 'events'));
+  } else if (number === undefined) forget(queryKeys.ofTeam(team, what), what === 'problems');
   else {
     const address = { team, number };
     if (what === 'problem') forget(queryKeys.problem(address));

@@ -45,9 +45,10 @@ export function Component() {
       </div>
       {problems && problems.length > 0 && <ProblemList team={team.slug} problems={problems} />}
       {problems?.length === 0 && <FirstProblem mayWrite={role !== 'advisor'} />}
-      {problems && role !== 'advisor' && (
-        <p className="mt-5">
-          <WordLink to={paths.newProblem(team.slug)}>New problem</WordLink>
+      {problems && (
+        <p className="mt-5 flex flex-wrap gap-x-6 gap-y-2">
+          {role !== 'advisor' && <WordLink to={paths.newProblem(team.slug)}>New problem</WordLink>}
+          <WordLink to={paths.fights(team.slug)}>Fights and events</WordLink>
         </p>
       )}
       {error && (
