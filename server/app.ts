@@ -12,6 +12,7 @@ import { mountFights } from './features/fights/routes.ts';
 import { mountFiles } from './features/files/routes.ts';
 import { mountHealth } from './features/health/routes.ts';
 import { mountLeaks } from './features/leaks/routes.ts';
+import { mountNotes } from './features/notes/routes.ts';
 import { mountProblems } from './features/problems/routes.ts';
 import { mountReport } from './features/report/routes.ts';
 import { mountSession } from './features/session/routes.ts';
@@ -52,6 +53,7 @@ export function createApp(deps: ServerDeps): Express {
   mountEditions(app, deps);
   mountCopies(app, deps);
   mountLeaks(app, deps);
+  mountNotes(app, deps);
 
   app.use('/api', () => {
     throw notFound();

@@ -7,11 +7,22 @@ import { audit } from './migrations/0003-audit.ts';
 import { reports } from './migrations/0004-reports.ts';
 import { editions } from './migrations/0005-editions.ts';
 import { copies } from './migrations/0006-copies.ts';
+import { notes } from './migrations/0007-notes.ts';
 import { leaks } from './migrations/0008-leaks.ts';
 import { fights } from './migrations/0011-fights.ts';
 
 /** In order. A table of imports rather than a folder that is read, so that the bundled server has them too. */
-const MIGRATIONS: readonly Migration[] = [people, problems, audit, reports, editions, copies, leaks, fights];
+const MIGRATIONS: readonly Migration[] = [
+  people,
+  problems,
+  audit,
+  reports,
+  editions,
+  copies,
+  notes,
+  leaks,
+  fights,
+];
 
 /** Brings the database up (or back down) one named step at a time, each in its own transaction. */
 export function createMigrator(database: Database) {

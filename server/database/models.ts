@@ -12,6 +12,7 @@ import { defineAllDefinitions, defineAuditEvents } from '#server/features/eviden
 import { defineEvents } from '#server/features/fights/model.ts';
 import { defineFiles } from '#server/features/files/model.ts';
 import { defineLeakAnswers, defineLeakMarks } from '#server/features/leaks/model.ts';
+import { defineMarginNotes, defineNoteReplies } from '#server/features/notes/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
 import { defineReportDocs, defineReportUpdates } from '#server/features/report/model.ts';
 import { defineSessions } from '#server/features/session/model.ts';
@@ -37,6 +38,8 @@ export function defineModels(sequelize: Sequelize) {
     files: defineFiles(sequelize),
     leakAnswers: defineLeakAnswers(sequelize),
     leakMarks: defineLeakMarks(sequelize),
+    marginNotes: defineMarginNotes(sequelize),
+    noteReplies: defineNoteReplies(sequelize),
     reportUpdates: defineReportUpdates(sequelize),
     editions: defineEditions(sequelize),
     copies: defineCopies(sequelize),

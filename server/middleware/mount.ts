@@ -23,8 +23,8 @@ export interface Call<E extends AnyEndpoint> {
   readonly param: (name: string) => string;
 }
 
-/** Read: everybody of the team. Write: captain and members. */
-export type Right = 'read' | 'write' | 'captain';
+/** Read: everybody of the team. Write: captain and members. Advise: advisors alone. */
+export type Right = 'read' | 'write' | 'advise' | 'captain';
 
 type Answer<E extends AnyEndpoint> = Promise<AnswerOf<E> | (undefined extends AnswerOf<E> ? void : never)>;
 
@@ -100,6 +100,9 @@ function assertRight<P extends TeamPlace>(place: P | null, right: Right): P {
   if (!place) throw notFound();
   if (right === 'write' && place.role === 'advisor') {
     throw notAllowed('Advisors read and advise; the captain and the members make changes.');
+  }
+  if (right === 'advise' && place.role !== 'advisor') {
+    throw notAllowed('Only an advisor may do this.');
   }
   if (right === 'captain' && place.role !== 'captain') {
     throw notAllowed('Only the captain may do this.');

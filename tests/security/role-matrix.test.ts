@@ -14,6 +14,7 @@ const RIGHTS: Readonly<Record<string, Readonly<Record<Who, 'yes' | 401 | 403 | 4
   'signed in': { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 'yes', 'signed out': 401 },
   'team reads': { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 404, 'signed out': 401 },
   'team writes': { captain: 'yes', member: 'yes', advisor: 403, 'other team': 404, 'signed out': 401 },
+  'advisor only': { captain: 403, member: 403, advisor: 'yes', 'other team': 404, 'signed out': 401 },
   'captain only': { captain: 'yes', member: 403, advisor: 403, 'other team': 404, 'signed out': 401 },
   /** Of a copy that the captain's team has lent, with its token. */
   'with the token': {
@@ -84,6 +85,11 @@ const MATRIX: Readonly<Record<string, string>> = {
   [`GET ${P}/exports/:export`]: 'team reads',
   [`DELETE ${P}/exports/:export`]: 'team reads',
   [`GET ${P}/exports/:export/file`]: 'team reads',
+  [`GET ${P}/notes`]: 'team reads',
+  [`POST ${P}/notes`]: 'advisor only',
+  [`POST ${P}/notes/:note/answers`]: 'team writes',
+  /** Who may make which change is tested with the notes. */
+  [`PATCH ${P}/notes/:note`]: 'team reads',
   [`GET ${P}/leaks`]: 'team reads',
   [`PUT ${P}/leaks/:leak/answer`]: 'team writes',
   [`GET ${P}/editions`]: 'team reads',

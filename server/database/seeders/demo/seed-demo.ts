@@ -8,6 +8,7 @@ import { seedReport } from '#server/features/report/service.ts';
 import { DEMO_EVENT_ID, demoEvent, demoFights, demoSeason } from './fights.ts';
 import { DEMO_PEOPLE } from './people.ts';
 import { seedLeaks } from './seed-leaks.ts';
+import { seedNotes } from './seed-notes.ts';
 import { DEMO_PROBLEMS, DEMO_SETTINGS } from './problems.ts';
 import type { DemoProblem } from './problems.ts';
 import { seedCopy } from './seed-copy.ts';
@@ -117,8 +118,10 @@ async function insertProblem(
   await storeEvidence(database, id, evidence, userIdOf, transaction);
   const report = problem.work?.report(evidence) ?? emptyReport();
   await seedReport(database, id, report, firstStart.toISOString(), transaction);
-  if (problem.number === 1)
+  if (problem.number === 1) {
     await seedLeaks(database, id, { evidence, document: report, at: firstStart.toISOString() }, transaction);
+    await seedNotes(database, id, firstStart, transaction);
+  }
   const editions = problem.work?.editions?.(firstStart) ?? [];
   await seedEditions(database, { ...problem, id }, TEAMS[0], editions, transaction);
 }
