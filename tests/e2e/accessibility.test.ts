@@ -46,12 +46,18 @@ afterAll(async () => {
   await app.stop();
 });
 
-async function findings(page: Page, path: string, theme: 'light' | 'dark'): Promise<string[]> {
+async function findings(
+  page: Page,
+  path: string,
+  theme: 'light' | 'dark',
+  prepare?: () => Promise<void>,
+): Promise<string[]> {
   await page.emulateMedia({ reducedMotion: 'reduce', colorScheme: theme });
   await page.goto(app.url + path);
   await page.locator('main').waitFor();
   await page.waitForLoadState('networkidle');
   await expect.poll(() => page.evaluate(() => document.documentElement.dataset.theme ?? 'light')).toBe(theme);
+  await prepare?.();
   const { violations } = await new AxeBuilder({ page })
     .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])
     .analyze();
@@ -81,6 +87,21 @@ describe.each(['light', 'dark'] as const)('in %s', (theme) => {
       await context.close();
     },
   );
+
+  test.each([1440, 390])('Report with a note being written, as the advisor, %i px wide', async (width) => {
+    const { page, context } = await person(browser, app.url, DEMO_PEOPLE.advisor, {
+      viewport: { width, height: 844 },
+    });
+    const write = async () => {
+      await page.getByRole('article', { name: /^Note 4,/ }).waitFor();
+      await page.getByRole('button', { name: 'Settle note 4' }).click();
+      await page.getByRole('radio', { name: 'Held to' }).click();
+      await page.getByRole('button', { name: 'Write a note' }).click();
+      await page.getByLabel('Your note').waitFor();
+    };
+    expect(await findings(page, `${P}/report`, theme, write)).toEqual([]);
+    await context.close();
+  });
 
   test('Sign in', async () => {
     const context = await browser.newContext();

@@ -14,6 +14,7 @@ import { useStationCup } from '#src/lib/station-cup.ts';
 import { useReportEditor } from '../editor/use-report-editor.ts';
 import type { ReportSession, ReportState } from '../session/report-session.ts';
 import { ReportPartsContext } from './report-context.ts';
+import type { ReportSlots } from './report-slots.ts';
 import { ReportSill } from './report-sill.tsx';
 import { SectionVessels } from './section-vessels.tsx';
 import { SessionNotice } from './session-notice.tsx';
@@ -26,7 +27,9 @@ import { useReportDocument } from './use-report-document.ts';
 export function OpenReport({
   session,
   state,
-}: {
+  extensions,
+  Margin,
+}: ReportSlots & {
   readonly session: ReportSession;
   readonly state: ReportState;
 }) {
@@ -35,8 +38,11 @@ export function OpenReport({
   const page = useRef<HTMLElement>(null);
   const { card, openReference, close } = useOpenCard(page);
   const readOnly = state.readOnly || !mayWrite;
-  const editor = useReportEditor(session, readOnly, ({ attrs, element, byKey }) =>
-    openReference(attrs.ref, element, byKey, attrs.unit),
+  const editor = useReportEditor(
+    session,
+    readOnly,
+    ({ attrs, element, byKey }) => openReference(attrs.ref, element, byKey, attrs.unit),
+    extensions,
   );
   const document = useReportDocument(editor);
   const parts = useMemo(
@@ -63,6 +69,7 @@ export function OpenReport({
             <SessionNotice state={state} editor={editor} />
           </div>
           <EditorContent editor={editor} data-region-start />
+          {Margin && <Margin editor={editor} page={page} />}
           {!readOnly && <TieList editor={editor} page={page} />}
           <SectionVessels
             page={page}

@@ -1,5 +1,6 @@
 import { Collaboration } from '@tiptap/extension-collaboration';
 import { CollaborationCaret } from '@tiptap/extension-collaboration-caret';
+import type { Extensions } from '@tiptap/core';
 import { useEditor, type Editor } from '@tiptap/react';
 import { useEffect, useState } from 'react';
 import { reportExtensions } from '#shared/report/schema/report-extensions.ts';
@@ -25,6 +26,7 @@ export function useReportEditor(
   session: ReportSession,
   readOnly: boolean,
   onOpen: (value: OpenValue) => void,
+  more: Extensions = [],
 ): Editor {
   const { store, me, role, address } = useProblem();
   const evidence = useEvidence();
@@ -52,6 +54,7 @@ export function useReportEditor(
         VisitedLines,
         UnfoldAtCaret.configure({ folded }),
         LooseNumbers.configure({ getSettings: settings.get }),
+        ...more,
       ],
       editorProps: {
         attributes: {

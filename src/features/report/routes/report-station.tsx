@@ -5,12 +5,13 @@ import { Word } from '#src/components/word.tsx';
 import { sentenceOf } from '#src/lib/api/api-error.ts';
 import { useStore } from '#src/lib/store/use-store.ts';
 import { OpenReport } from '../components/open-report.tsx';
+import type { ReportSlots } from '../components/report-slots.ts';
 import { SessionNotice } from '../components/session-notice.tsx';
 import type { ReportSession } from '../session/report-session.ts';
 import { useReportSession } from '../session/use-report-session.ts';
 
 /** The report: one page that the team writes together, bound to the evidence. */
-export function ReportStation() {
+export function ReportStation(slots: ReportSlots) {
   const { session, error, retry } = useReportSession();
   if (error && !session) {
     return (
@@ -21,12 +22,12 @@ export function ReportStation() {
       </main>
     );
   }
-  return session ? <Opening key={session.doc.guid} session={session} /> : <Waiting />;
+  return session ? <Opening key={session.doc.guid} session={session} {...slots} /> : <Waiting />;
 }
 
-function Opening({ session }: { readonly session: ReportSession }) {
+function Opening({ session, ...slots }: ReportSlots & { readonly session: ReportSession }) {
   const state = useStore(session.state);
-  if (state.phase === 'open') return <OpenReport session={session} state={state} />;
+  if (state.phase === 'open') return <OpenReport session={session} state={state} {...slots} />;
   if (state.phase === 'opening') return <Waiting />;
   return (
     <main id="page" tabIndex={-1} data-region="page" className="page-top mx-auto max-w-[760px] px-6">
