@@ -7,6 +7,7 @@ import type { EvidenceCache } from './features/evidence/service.ts';
 import type { EventHub } from './features/events/service.ts';
 import type { CopyPasses } from './features/copies/copy-passes.ts';
 import type { SessionLayer } from './features/session/session-layer.ts';
+import type { MailDelivery } from './mail/mail-delivery.ts';
 import type { Csrf } from './middleware/csrf.ts';
 import type { Limits } from './middleware/rate-limits.ts';
 import type { ReportRenderer } from './rendering/report-renderer.ts';
@@ -23,6 +24,9 @@ export interface ServerDeps {
   readonly csrf: Csrf;
   readonly copyPasses: CopyPasses;
   readonly limits: Limits;
+  readonly mail: MailDelivery;
+  /** Where people reach this server, for links in mail; never taken from a request, which anybody can forge. */
+  readonly publicAddress: () => string;
   readonly sockets: OpenSockets;
   readonly events: EventHub;
   readonly evidenceCache: EvidenceCache;

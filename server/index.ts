@@ -13,6 +13,13 @@ async function start(): Promise<void> {
   const running = await startServer({ environment, logger, now: () => new Date() });
   logger.info({ url: running.url, data: environment.dataFolder, mode: environment.mode }, 'listening');
   stopOnSignals(running);
+  if (running.setupLink !== null) {
+    // On the terminal of who started it and nowhere else: this is no line of the log.
+    process.stdout.write(
+      `\nNobody looks after this installation yet. Open this once, within 24 hours, to set it up:\n`,
+    );
+    process.stdout.write(`  ${running.setupLink}\n`);
+  }
   // Whoever started us waits for this: over its channel, or as one line when there is none.
   if (process.send) process.send({ ready: running.url });
   else process.stdout.write(`ready ${running.url}\n`);

@@ -14,6 +14,7 @@ import type { Environment } from './config/environment.ts';
 import { getSessionSecret } from './config/session-secret.ts';
 import { databaseFile } from './database/database-file.ts';
 import { openDatabase } from './database/database.ts';
+import type { Database } from './database/database.ts';
 import { createMigrator } from './database/migrator.ts';
 import { seedDemo } from './database/seeders/demo/seed-demo.ts';
 import type { ServerDeps } from './deps.ts';
@@ -22,8 +23,12 @@ import { createCopyPasses } from './features/copies/copy-passes.ts';
 import { attachEventStream } from './features/events/event-stream.ts';
 import { EventHub } from './features/events/service.ts';
 import { createEvidenceCache } from './features/evidence/service.ts';
+import { createSetupLink } from './features/admin/service.ts';
 import { createSessionLayer } from './features/session/session-layer.ts';
 import { clearExpiredSessions } from './features/session/service.ts';
+import { MailDelivery } from './mail/mail-delivery.ts';
+import { createMailTransport } from './mail/transport.ts';
+import type { MailTransport } from './mail/transport.ts';
 import { createCsrf } from './middleware/csrf.ts';
 import { DEFAULT_LIMITS } from './middleware/rate-limits.ts';
 import type { Limits } from './middleware/rate-limits.ts';
@@ -36,12 +41,16 @@ export interface ServerOptions {
   readonly logger: Logger;
   readonly now: () => Date;
   readonly limits?: Limits;
+  /** Takes the mail; without it, the one that the environment names. */
+  readonly mailTransport?: MailTransport;
 }
 
 export interface RunningServer {
   readonly url: string;
   readonly app: Express;
   readonly deps: ServerDeps;
+  /** Opens the set-up once, while nobody looks after the installation and there is no demonstration; null otherwise. */
+  readonly setupLink: string | null;
   /** Tells open tabs that it restarts, finishes what is under way, and closes everything. */
   close(): Promise<void>;
 }
@@ -52,26 +61,33 @@ export async function startServer(options: ServerOptions): Promise<RunningServer
   await mkdir(environment.dataFolder, { recursive: true });
   const server = createServer();
   const client = await createClient(environment, server);
-  const deps = await createDeps(options, client);
+  const address = { url: '' };
+  const deps = await createDeps(options, client, () => environment.publicUrl ?? address.url);
   const app = createApp(deps);
   server.on('request', app);
   const upgrades = attachSocketUpgrades(server, { ...deps, findActor: deps.session.findActor });
   attachEventStream(upgrades, deps);
   const collaboration = attachCollaboration(upgrades, deps);
   const port = await listen(server, environment);
+  address.url = `http://${environment.host.includes(':') ? `[${environment.host}]` : environment.host}:${port}`;
   const clearing = setInterval(() => clearSessions(deps), HOUR_MS);
+  const delivering = setInterval(() => void deps.mail.wake(), MAIL_EVERY_MS);
+  void deps.mail.wake();
   return {
-    url: `http://${environment.host.includes(':') ? `[${environment.host}]` : environment.host}:${port}`,
+    url: address.url,
+    setupLink: environment.demo ? null : await createSetupLink(deps),
     app,
     deps,
     close: () => {
       clearInterval(clearing);
+      clearInterval(delivering);
       return closeAll(server, client, collaboration, deps);
     },
   };
 }
 
 const HOUR_MS = 3_600_000;
+const MAIL_EVERY_MS = 20_000;
 
 function clearSessions({ database, now, logger }: ServerDeps): void {
   clearExpiredSessions(database, now()).catch((error: unknown) => {
@@ -80,14 +96,17 @@ function clearSessions({ database, now, logger }: ServerDeps): void {
 }
 
 async function createDeps(
-  { environment, logger, now, limits }: ServerOptions,
+  options: ServerOptions,
   client: ServedClient | null,
+  publicAddress: () => string,
 ): Promise<ServerDeps> {
+  const { environment, logger, now, limits } = options;
   const secret = await getSessionSecret(environment.dataFolder);
   const database = openDatabase(databaseFile(environment.dataFolder));
   await createMigrator(database).up();
   if (environment.demo) await seedDemo(database, now());
   await clearExpiredSessions(database, now());
+  const events = new EventHub();
   return {
     environment,
     database,
@@ -98,12 +117,28 @@ async function createDeps(
     copyPasses: createCopyPasses(secret, now),
     limits: limits ?? DEFAULT_LIMITS,
     sockets: new OpenSockets(),
-    events: new EventHub(),
+    mail: createMail(options, database, events),
+    publicAddress,
+    events,
     evidenceCache: createEvidenceCache(),
     evaluation: createEvaluation(logger),
     renderer: createReportRenderer(logger),
     client: client?.handler ?? null,
   };
+}
+
+function createMail(
+  { environment, logger, now, mailTransport }: ServerOptions,
+  database: Database,
+  events: EventHub,
+): MailDelivery {
+  const { smtpUrl, dataFolder, mailFrom } = environment;
+  const transport = mailTransport ?? createMailTransport({ smtpUrl, dataFolder, from: mailFrom });
+  const onChange = async (teamId: string) => {
+    const team = await database.models.teams.findByPk(teamId, { attributes: ['slug'], raw: true });
+    if (team) events.publishStale({ team: { id: teamId, slug: team.slug }, role: 'captain' }, 'outbox');
+  };
+  return new MailDelivery({ database, transport, logger, now, onChange });
 }
 
 async function createClient(environment: Environment, server: Server): Promise<ServedClient | null> {
@@ -146,6 +181,7 @@ async function closeAll(
   clearTimeout(impatience);
   await client?.close();
   await collaboration.close();
+  await deps.mail.close();
   await deps.evaluation.close();
   await deps.renderer.close();
   await deps.database.close();

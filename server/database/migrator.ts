@@ -9,6 +9,7 @@ import { editions } from './migrations/0005-editions.ts';
 import { copies } from './migrations/0006-copies.ts';
 import { notes } from './migrations/0007-notes.ts';
 import { leaks } from './migrations/0008-leaks.ts';
+import { invitations } from './migrations/0010-people.ts';
 import { fights } from './migrations/0011-fights.ts';
 
 /** In order. A table of imports rather than a folder that is read, so that the bundled server has them too. */
@@ -21,6 +22,7 @@ const MIGRATIONS: readonly Migration[] = [
   copies,
   notes,
   leaks,
+  invitations,
   fights,
 ];
 

@@ -1,6 +1,6 @@
 /** Every table as a Sequelize model, bound to one connection; and what they are to one another. */
 import type { Sequelize } from 'sequelize';
-import { defineUsers } from '#server/features/account/model.ts';
+import { defineTokens, defineUsers } from '#server/features/account/model.ts';
 import {
   defineCopies,
   defineCopyQuestions,
@@ -11,6 +11,7 @@ import { defineEditions } from '#server/features/editions/model.ts';
 import { defineAllDefinitions, defineAuditEvents } from '#server/features/evidence/model.ts';
 import { defineEvents } from '#server/features/fights/model.ts';
 import { defineFiles } from '#server/features/files/model.ts';
+import { defineInvitations } from '#server/features/invitations/model.ts';
 import { defineLeakAnswers, defineLeakMarks } from '#server/features/leaks/model.ts';
 import { defineMarginNotes, defineNoteReplies } from '#server/features/notes/model.ts';
 import { defineProblems, defineTasks } from '#server/features/problems/model.ts';
@@ -18,15 +19,19 @@ import { defineReportDocs, defineReportUpdates } from '#server/features/report/m
 import { defineSessions } from '#server/features/session/model.ts';
 import { defineFights, defineMemberships, defineTeams } from '#server/features/teams/model.ts';
 import { defineTrials } from '#server/features/trials/model.ts';
+import { defineOutbox } from '#server/mail/model.ts';
 
 export type Models = ReturnType<typeof defineModels>;
 
 export function defineModels(sequelize: Sequelize) {
   return {
     users: defineUsers(sequelize),
+    tokens: defineTokens(sequelize),
     sessions: defineSessions(sequelize),
     teams: defineTeams(sequelize),
     memberships: defineMemberships(sequelize),
+    invitations: defineInvitations(sequelize),
+    outbox: defineOutbox(sequelize),
     fights: defineFights(sequelize),
     events: defineEvents(sequelize),
     problems: defineProblems(sequelize),

@@ -6,6 +6,11 @@ export function notFound(what = 'There is nothing at this address.'): AppError {
   return new AppError(404, 'not-found', what);
 }
 
+/** The one refusal of every link that opens nothing: unknown, forged, used, withdrawn, over. */
+export function deadLink(): AppError {
+  return notFound('This link opens nothing. It may have been used, or its time is over. Ask for a new one.');
+}
+
 export function notSignedIn(): AppError {
   return new AppError(401, 'not-signed-in', 'You are not signed in. Sign in and try again.');
 }

@@ -7,6 +7,7 @@ import type { z } from 'zod';
 import type { AnswerOf, BodyOf, Endpoint } from '#shared/contracts/endpoint.ts';
 import type { Database } from '#server/database/database.ts';
 import { notAllowed, notFound, notSignedIn } from '#server/errors/refusals.ts';
+import { isAdministrator } from '#server/features/account/service.ts';
 import { findProblemPlace, findTeamPlace } from '#server/features/teams/service.ts';
 import type { ProblemPlace, TeamPlace } from '#server/features/teams/service.ts';
 import type { Actor } from './actor.ts';
@@ -52,6 +53,21 @@ export function mountSignedIn<E extends AnyEndpoint>(
 ): void {
   const enter = (request: Request) => Promise.resolve({ actor: getActor(request) });
   register(app, endpoint, enter, handler, options);
+}
+
+/** A route of who looks after the installation; for everybody else there is none: 404. */
+export function mountAdministrator<E extends AnyEndpoint>(
+  app: Express,
+  database: Database,
+  endpoint: E,
+  handler: (call: Call<E> & { readonly actor: Actor }) => Answer<E>,
+): void {
+  const enter = async (request: Request) => {
+    const actor = getActor(request);
+    if (!(await isAdministrator(database, actor.id))) throw notFound();
+    return { actor };
+  };
+  register(app, endpoint, enter, handler, {});
 }
 
 /** A route of one team: 404 for who is not in it, 403 for who is but may not. */

@@ -31,18 +31,45 @@ export function tokenLimit(limits: Limits): RequestHandler {
   return failureLimit(limits.minutes, limits.failuresPerAddress, undefined, [404, 422]);
 }
 
+/** Slows down whoever tries links, and whoever guesses at the passphrase of an account that was invited. */
+export function invitationLimits(limits: Limits): RequestHandler[] {
+  const tokenOf = (request: Request) => String(request.params.token);
+  return [tokenLimit(limits), failureLimit(limits.minutes, limits.failuresPerAccount, tokenOf, [422])];
+}
+
+/** Bounds the mail that somebody signed in can cause, whether it is refused or not. */
+export function askLimit(limits: Limits): RequestHandler {
+  return countLimit(limits.minutes, limits.failuresPerAddress, (request) => request.user?.id ?? 'nobody');
+}
+
+/** Bounds the mail that anybody can cause, from one address and to one address. */
+export function resetLimits(limits: Limits): RequestHandler[] {
+  return [
+    countLimit(limits.minutes, limits.failuresPerAddress, undefined),
+    countLimit(limits.minutes, limits.failuresPerAccount, accountOf),
+  ];
+}
+
+function countLimit(
+  minutes: number,
+  limit: number,
+  keyGenerator: ((request: Request) => string) | undefined,
+): RequestHandler {
+  return failureLimit(minutes, limit, keyGenerator, 'all');
+}
+
 function failureLimit(
   minutes: number,
   limit: number,
   keyGenerator: ((request: Request) => string) | undefined,
-  /** Answers that count as failures; null: every refusal. */
-  failures: readonly number[] | null = null,
+  /** Answers that count as failures; null: every refusal; all: whatever is answered. */
+  failures: readonly number[] | null | 'all' = null,
 ): RequestHandler {
   return rateLimit({
     windowMs: minutes * 60_000,
     limit,
-    skipSuccessfulRequests: true,
-    ...(failures === null
+    skipSuccessfulRequests: failures !== 'all',
+    ...(failures === null || failures === 'all'
       ? {}
       : { requestWasSuccessful: (_request, { statusCode }) => !failures.includes(statusCode) }),
     standardHeaders: 'draft-7',

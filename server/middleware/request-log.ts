@@ -25,7 +25,7 @@ export function requestLog(logger: Logger): RequestHandler {
   });
 }
 
-/** The token in the address of a lent copy opens it: it is left out, what is asked of the copy stays. */
+/** A token in an address opens what it belongs to: it is left out, what is asked stays. */
 function withoutToken(path: string): string {
-  return path.replace(/^(\/api\/copies\/)[^/]+/i, '$1…');
+  return path.replace(/^(\/api\/(?:copies|invitations|password-resets|setup)\/)[^/]+/i, '$1…');
 }

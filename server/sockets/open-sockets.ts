@@ -27,6 +27,11 @@ export class OpenSockets {
     );
   }
 
+  /** After a forgotten passphrase was set anew, or an account was locked: all of the person's sockets. */
+  signOutPerson(userId: string): void {
+    this.#close((actor) => actor.id === userId, SOCKET_CODES.signedOut, 'signed out');
+  }
+
   /** After a change of role: all of the person's sockets. They come back with the new role. */
   closePerson(userId: string): void {
     this.#close((actor) => actor.id === userId, SOCKET_CODES.notYours, 'role changed');

@@ -6,7 +6,13 @@ export const roleSchema = z.enum(['captain', 'member', 'advisor']);
 export type Role = z.infer<typeof roleSchema>;
 
 export const sessionSchema = z.object({
-  user: z.object({ id: z.string(), name: z.string(), email: z.string() }),
+  user: z.object({
+    id: z.string(),
+    name: z.string(),
+    email: z.string(),
+    /** Looks after the installation and reads no problem; left out for everybody else. */
+    isAdministrator: z.literal(true).optional(),
+  }),
   teams: z.array(z.object({ slug: z.string(), name: z.string(), university: z.string(), role: roleSchema })),
 });
 export type Session = z.infer<typeof sessionSchema>;

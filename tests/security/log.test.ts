@@ -15,6 +15,8 @@ test('log, when people sign in, change things and fail: holds no passphrase, coo
   await ines.put('/api/account/password', { current: 'a wrong one, really', next: 'tern rock ebb table' });
   await ines.patch(SPOUT, { title: 'A Secret Title' }).set('if-match', '1');
   await ines.get(`${SPOUT}?key=in-the-query`);
+  for (const place of ['invitations', 'setup', 'password-resets', 'copies'])
+    await ines.get(`/api/${place}/what-opens-it`);
   await request(app.url).post('/api/session').set('authorization', 'Bearer of-bad-news').send('{"broken');
 
   const log = app.log.join('');
@@ -27,6 +29,7 @@ test('log, when people sign in, change things and fail: holds no passphrase, coo
     'A Secret Title',
     'in-the-query',
     'of-bad-news',
+    'what-opens-it',
     'ines.farrow',
     ines.token,
     session,

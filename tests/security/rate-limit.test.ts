@@ -1,4 +1,5 @@
 import { afterEach, beforeEach, expect, test } from 'vitest';
+import { linkIn, readMailFolder } from '#tests/support/mail-folder.ts';
 import { startTestServer } from '#tests/support/server.ts';
 import type { TestServer } from '#tests/support/server.ts';
 
@@ -60,4 +61,41 @@ test('copies, when one address tries token after token: is slowed down, whatever
 
   const stranger = await app.stranger();
   expect((await stranger.get('/api/copies/another-guess')).status).toBe(429);
+});
+
+test.each(['invitations', 'setup'])(
+  '%s, when one address tries link after link: is slowed down',
+  async (place) => {
+    const attempt = async (n: number) => (await app.stranger()).get(`/api/${place}/guess-${n}`);
+    for (const n of [1, 2, 3, 4, 5, 6]) expect((await attempt(n)).status).toBe(404);
+
+    expect((await attempt(7)).status).toBe(429);
+  },
+);
+
+test.each(['ines.farrow@skerry.example', 'nobody@skerry.example'])(
+  'forgotten passphrase, when it is asked for %s again and again: writes no more mail, known or not',
+  async (email) => {
+    const ask = async () => (await app.stranger()).post('/api/password-resets', { email });
+    for (const _attempt of [1, 2, 3]) expect((await ask()).status).toBe(204);
+
+    expect((await ask()).status).toBe(429);
+  },
+);
+
+test('invited account, when its passphrase is guessed at through the link: is slowed down', async () => {
+  const ines = await app.signIn('ines');
+  await ines.post('/api/teams/tern-rock/invitations', {
+    name: 'Sunniva Dahl',
+    email: 'sunniva.dahl@gannet.example',
+    role: 'advisor',
+  });
+  await app.server.deps.mail.wake();
+  const [mail = ''] = readMailFolder(app.dataFolder);
+  const link = linkIn(mail).replace('/join/', '/api/invitations/');
+  const attempt = async () =>
+    (await app.stranger()).post(link, { name: 'S', passphrase: 'a guess of twelve' });
+  for (const _attempt of [1, 2, 3]) expect((await attempt()).status).toBe(422);
+
+  expect((await attempt()).status).toBe(429);
 });

@@ -2,26 +2,79 @@
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type { Express } from 'express';
 import { lend } from '#tests/support/lend.ts';
+import { setUpAdministrator, signInAdministrator } from '#tests/support/administrator.ts';
 import { startTestServer } from '#tests/support/server.ts';
 import type { SignedIn, TestServer } from '#tests/support/server.ts';
 
-const WHO = ['captain', 'member', 'advisor', 'other team', 'signed out'] as const;
+const WHO = ['captain', 'member', 'advisor', 'other team', 'administrator', 'signed out'] as const;
 type Who = (typeof WHO)[number];
 
 /** Ways in which a route may be open; each column is what everybody is answered: yes, or the refusing status. */
 const RIGHTS: Readonly<Record<string, Readonly<Record<Who, 'yes' | 401 | 403 | 404>>>> = {
-  anybody: { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 'yes', 'signed out': 'yes' },
-  'signed in': { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 'yes', 'signed out': 401 },
-  'team reads': { captain: 'yes', member: 'yes', advisor: 'yes', 'other team': 404, 'signed out': 401 },
-  'team writes': { captain: 'yes', member: 'yes', advisor: 403, 'other team': 404, 'signed out': 401 },
-  'advisor only': { captain: 403, member: 403, advisor: 'yes', 'other team': 404, 'signed out': 401 },
-  'captain only': { captain: 'yes', member: 403, advisor: 403, 'other team': 404, 'signed out': 401 },
+  anybody: {
+    captain: 'yes',
+    member: 'yes',
+    advisor: 'yes',
+    'other team': 'yes',
+    administrator: 'yes',
+    'signed out': 'yes',
+  },
+  'signed in': {
+    captain: 'yes',
+    member: 'yes',
+    advisor: 'yes',
+    'other team': 'yes',
+    administrator: 'yes',
+    'signed out': 401,
+  },
+  'team reads': {
+    captain: 'yes',
+    member: 'yes',
+    advisor: 'yes',
+    'other team': 404,
+    administrator: 404,
+    'signed out': 401,
+  },
+  'team writes': {
+    captain: 'yes',
+    member: 'yes',
+    advisor: 403,
+    'other team': 404,
+    administrator: 404,
+    'signed out': 401,
+  },
+  'advisor only': {
+    captain: 403,
+    member: 403,
+    advisor: 'yes',
+    'other team': 404,
+    administrator: 404,
+    'signed out': 401,
+  },
+  'captain only': {
+    captain: 'yes',
+    member: 403,
+    advisor: 403,
+    'other team': 404,
+    administrator: 404,
+    'signed out': 401,
+  },
+  /** For everybody else there is nothing at these addresses. */
+  'administrator only': {
+    captain: 404,
+    member: 404,
+    advisor: 404,
+    'other team': 404,
+    administrator: 'yes',
+    'signed out': 401,
+  },
   /** Of a copy that the captain's team has lent, with its token. */
   'with the token': {
     captain: 'yes',
     member: 'yes',
     advisor: 'yes',
     'other team': 'yes',
+    administrator: 'yes',
     'signed out': 'yes',
   },
   'token, not of the lender': {
@@ -29,6 +82,7 @@ const RIGHTS: Readonly<Record<string, Readonly<Record<Who, 'yes' | 401 | 403 | 4
     member: 404,
     advisor: 404,
     'other team': 'yes',
+    administrator: 'yes',
     'signed out': 'yes',
   },
   /** The calls of this test have no key; the tests of the questions have. */
@@ -37,6 +91,7 @@ const RIGHTS: Readonly<Record<string, Readonly<Record<Who, 'yes' | 401 | 403 | 4
     member: 404,
     advisor: 404,
     'other team': 403,
+    administrator: 403,
     'signed out': 403,
   },
 };
@@ -52,8 +107,25 @@ const MATRIX: Readonly<Record<string, string>> = {
   'GET /api/session': 'signed in',
   'DELETE /api/session': 'signed in',
   'PUT /api/account/password': 'signed in',
+  'POST /api/password-resets': 'anybody',
+  'PUT /api/password-resets/:token': 'anybody',
+  'GET /api/invitations/:token': 'anybody',
+  'POST /api/invitations/:token': 'anybody',
+  'GET /api/setup/:token': 'anybody',
+  'POST /api/setup/:token': 'anybody',
+  'GET /api/admin/teams': 'administrator only',
+  'POST /api/admin/teams': 'administrator only',
+  'POST /api/admin/teams/:team/captains': 'administrator only',
+  'GET /api/admin/people': 'administrator only',
+  'PATCH /api/admin/people/:person': 'administrator only',
   'GET /api/teams/:team': 'team reads',
   'PATCH /api/teams/:team/members/:person': 'captain only',
+  'DELETE /api/teams/:team/members/:person': 'captain only',
+  'GET /api/teams/:team/invitations': 'captain only',
+  'POST /api/teams/:team/invitations': 'captain only',
+  'DELETE /api/teams/:team/invitations/:invitation': 'captain only',
+  'GET /api/teams/:team/outbox': 'captain only',
+  'POST /api/teams/:team/outbox/:mail/retry': 'captain only',
   'GET /api/teams/:team/fights': 'team reads',
   'POST /api/teams/:team/fights': 'captain only',
   'PUT /api/teams/:team/fights/:id': 'captain only',
@@ -122,6 +194,7 @@ let lent = '';
 const people = new Map<Who, SignedIn>();
 beforeAll(async () => {
   app = await startTestServer();
+  await setUpAdministrator(app);
   for (const who of WHO) await enter(who);
   ({ token: lent } = await lend(await app.signIn('ines')));
 });
@@ -130,7 +203,9 @@ afterAll(() => app.stop());
 const NAMES = { captain: 'ines', member: 'kasimir', advisor: 'odile', 'other team': 'sunniva' } as const;
 
 async function enter(who: Who): Promise<void> {
-  people.set(who, who === 'signed out' ? await app.stranger() : await app.signIn(NAMES[who]));
+  if (who === 'signed out') people.set(who, await app.stranger());
+  else if (who === 'administrator') people.set(who, await signInAdministrator(app));
+  else people.set(who, await app.signIn(NAMES[who]));
 }
 
 function routesOf(express: Express): string[] {

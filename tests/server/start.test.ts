@@ -62,6 +62,26 @@ test('start, where the demonstration is not wanted: there is no team and no sign
   await server.close();
 });
 
+test('start, where nobody looks after the installation: has a link for that, and a new one at each start', async () => {
+  const first = await start({ HOLDWATER_DEMO: '0', PUBLIC_URL: 'https://holdwater.example' });
+  await first.close();
+  const second = await start({ HOLDWATER_DEMO: '0' });
+
+  const open = async (link: string | null) =>
+    (await request(second.url).get(`/api${new URL(link ?? '').pathname}`)).status;
+  expect(first.setupLink).toMatch(/^https:\/\/holdwater\.example\/setup\/[\w-]{43}$/);
+  expect(await open(first.setupLink)).toBe(404);
+  expect(await open(second.setupLink)).toBe(200);
+  await second.close();
+});
+
+test('start, with the demonstration: prints no link to set up, for anybody on this machine may read it', async () => {
+  const server = await start();
+
+  expect(server.setupLink).toBeNull();
+  await server.close();
+});
+
 test('start, with the demonstration in the data but not wanted any more: no sign-in is told', async () => {
   await (await start()).close();
 

@@ -25,6 +25,8 @@ export interface TestServer {
   readonly log: readonly string[];
   /** A person with their own cookies and token. */
   signIn(name: DemoName): Promise<SignedIn>;
+  /** Anybody with an account, by what they type. */
+  signInWith(email: string, passphrase: string): Promise<SignedIn>;
   /** Somebody with cookies and a token, but not signed in. */
   stranger(): Promise<SignedIn>;
   /** Sets the clock. */
@@ -62,6 +64,7 @@ export async function startTestServer(options: Partial<ServerOptions> = {}): Pro
     dataFolder,
     log,
     signIn: (name) => signIn(server.url, name),
+    signInWith: (email, passphrase) => signInWith(server.url, email, passphrase),
     stranger: () => withToken(server.url, new Map()),
     setNow(next) {
       now = next;
@@ -108,9 +111,13 @@ async function migratedBase(): Promise<string> {
 async function signIn(url: string, name: DemoName): Promise<SignedIn> {
   const person = DEMO_PEOPLE.find(({ id }) => id === `demo-${name}`);
   if (!person) throw new RangeError(`signIn: needs a person of the demonstration, got ${name}`);
+  return signInWith(url, person.email, person.passphrase);
+}
+
+async function signInWith(url: string, email: string, passphrase: string): Promise<SignedIn> {
   const cookies = new Map<string, string>();
   const before = await withToken(url, cookies);
-  const answer = await before.post('/api/session', { email: person.email, passphrase: person.passphrase });
+  const answer = await before.post('/api/session', { email, passphrase });
   if (answer.status !== 200) throw new Error(`signIn: answered ${answer.status} ${answer.text}`);
   keepCookies(cookies, answer);
   return withToken(url, cookies);

@@ -12,6 +12,8 @@ export interface UserModel extends Model<InferAttributes<UserModel>, InferCreati
   /** Set: this person may not sign in. */
   disabledAt: CreationOptional<string | null>;
   createdAt: string;
+  /** Looks after the installation. */
+  isAdministrator: CreationOptional<boolean>;
 }
 
 export function defineUsers(sequelize: Sequelize) {
@@ -23,5 +25,24 @@ export function defineUsers(sequelize: Sequelize) {
     passphraseChangedAt: DataTypes.STRING,
     disabledAt: DataTypes.STRING,
     createdAt: DataTypes.STRING,
+    isAdministrator: { type: DataTypes.BOOLEAN, defaultValue: false },
+  });
+}
+
+/** A link that opens one thing once: the set-up of the installation, or a new passphrase. Only its hash is kept. */
+export interface TokenModel extends Model<InferAttributes<TokenModel>, InferCreationAttributes<TokenModel>> {
+  tokenHash: string;
+  kind: 'setup' | 'reset';
+  /** Whose passphrase it is for; null for the set-up. */
+  userId: string | null;
+  expiresAt: string;
+}
+
+export function defineTokens(sequelize: Sequelize) {
+  return sequelize.define<TokenModel>('tokens', {
+    tokenHash: { type: DataTypes.STRING, primaryKey: true },
+    kind: DataTypes.STRING,
+    userId: DataTypes.STRING,
+    expiresAt: DataTypes.STRING,
   });
 }

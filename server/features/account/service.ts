@@ -7,6 +7,7 @@ import { DEMO_PEOPLE } from '#server/database/seeders/demo/people.ts';
 import type { DemoPerson } from '#server/database/seeders/demo/people.ts';
 import { fitsPassphrase, hashPassphrase } from './passphrase.ts';
 
+export type { UserModel } from './model.ts';
 export { fitsPassphrase, hashPassphrase } from './passphrase.ts';
 
 interface Person {
@@ -22,6 +23,11 @@ export async function findUser(database: Database, id: string): Promise<Person |
     where: { id, disabledAt: null },
     raw: true,
   });
+}
+
+/** Whether this person looks after the installation. */
+export async function isAdministrator(database: Database, id: string): Promise<boolean> {
+  return (await database.models.users.count({ where: { id, isAdministrator: true } })) > 0;
 }
 
 /** The person whose e-mail and passphrase these are, or null: which of the two was wrong is never told. */

@@ -6,7 +6,7 @@ import { listTeamIds } from '#server/features/teams/service.ts';
 import type { PassKind } from './copy-passes.ts';
 import type { CopyModel } from './model.ts';
 import { standingAt } from './standing.ts';
-import { hashCopyToken } from './token.ts';
+import { hashSecretToken } from '#server/tokens/secret-token.ts';
 
 export type ReadingDeps = Pick<
   ServerDeps,
@@ -40,7 +40,7 @@ export async function findCopy(
   { token, userId }: CopyVisitor,
 ): Promise<FoundCopy | null> {
   const row = await database.models.copies.findOne({
-    where: { tokenHash: hashCopyToken(token) },
+    where: { tokenHash: hashSecretToken(token) },
     raw: true,
   });
   if (!row) return null;

@@ -9,7 +9,7 @@ import type { PdfFile } from '#server/rendering/pdf-file.ts';
 import { getOpenCopy, getUnpassedCopy, type CopyVisitor, type ReadingDeps } from './find-copy.ts';
 import { printCopy } from './print-copy.ts';
 import type { CopyModel } from './model.ts';
-import { hashCopyToken } from './token.ts';
+import { hashSecretToken } from '#server/tokens/secret-token.ts';
 import { standingAt } from './standing.ts';
 import { recordView } from './record-view.ts';
 import { viewOf } from './copy-views.ts';
@@ -93,7 +93,7 @@ export async function findDemoCopy(
   token: string,
 ): Promise<{ token: string; recipient: string; title: string } | null> {
   const row = await database.models.copies.findOne({
-    where: { tokenHash: hashCopyToken(token) },
+    where: { tokenHash: hashSecretToken(token) },
     raw: true,
   });
   if (!row || standingAt(row, now()) !== 'open') return null;

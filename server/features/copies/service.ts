@@ -12,10 +12,9 @@ import type { ProblemPlace, TeamPlace } from '#server/features/teams/service.ts'
 import type { Actor } from '#server/middleware/actor.ts';
 import { findBorrowed, findCopies } from './list-copies.ts';
 import type { CopyModel } from './model.ts';
-import { hashCopyToken, newCopyToken } from './token.ts';
+import { hashSecretToken, newSecretToken } from '#server/tokens/secret-token.ts';
 
 export { findDemoCopy } from './read-copy.ts';
-export { hashCopyToken } from './token.ts';
 
 export type CopyDeps = Pick<ServerDeps, 'database' | 'events' | 'now'>;
 
@@ -46,7 +45,7 @@ export async function lendCopy(
 ): Promise<{ copy: Copy; token: string }> {
   const edition = await getEdition(deps.database, place.problem.id, n);
   assertTimes(wanted.from, wanted.until, deps.now());
-  const token = newCopyToken();
+  const token = newSecretToken();
   const passphraseHash = wanted.passphrase === null ? null : await hashPassphrase(wanted.passphrase);
   const copy = await deps.database.write(async (transaction) => {
     const row = await deps.database.models.copies.create(
@@ -56,7 +55,7 @@ export async function lendCopy(
         problemId: place.problem.id,
         editionId: edition.id,
         number: await nextNumber(deps, place, transaction),
-        tokenHash: hashCopyToken(token),
+        tokenHash: hashSecretToken(token),
         recipient: wanted.recipient,
         recipientTeamId: await findTeamOfName(deps, wanted.recipient, transaction),
         reader: wanted.reader,

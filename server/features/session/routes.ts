@@ -26,9 +26,7 @@ export function mountSession(app: Express, deps: ServerDeps): void {
       if (!user) {
         throw new AppError(401, 'wrong-credentials', 'This e-mail and passphrase do not fit together.');
       }
-      await new Promise<void>((resolve, reject) => {
-        request.login(user, (error: unknown) => (error ? reject(error) : resolve()));
-      });
+      await deps.session.logIn(request, user);
       return getSession(deps.database, user);
     },
     { before: signInLimits(deps.limits) },

@@ -14,6 +14,8 @@ export interface SessionLayer {
   readonly handlers: readonly RequestHandler[];
   /** Checks the e-mail and passphrase of the body; null when they do not fit. */
   readonly checkCredentials: (request: Request, response: Response) => Promise<Express.User | null>;
+  /** Begins a session of this person, under a new id. */
+  readonly logIn: (request: Request, user: Express.User) => Promise<void>;
   /** The same sessions for a request outside Express: the upgrade to a socket. */
   readonly findActor: (request: IncomingMessage) => Promise<Actor | null>;
 }
@@ -54,6 +56,10 @@ export function createSessionLayer(database: Database, secret: string, now: () =
         const decide = (error: unknown, user: Express.User | false | undefined) =>
           error ? reject(error) : resolve(user || null);
         passport.authenticate('local', decide)(request, response, reject);
+      }),
+    logIn: (request, user) =>
+      new Promise((resolve, reject) => {
+        request.login(user, (error: unknown) => (error ? reject(error) : resolve()));
       }),
     findActor: (message) => findActor(message, [sessions, signedIn]),
   };

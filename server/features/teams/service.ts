@@ -5,9 +5,13 @@ import type { Database } from '#server/database/database.ts';
 import { AppError } from '#server/errors/app-error.ts';
 import { notFound } from '#server/errors/refusals.ts';
 import type { OpenSockets } from '#server/sockets/open-sockets.ts';
+import { isAdministrator } from '#server/features/account/service.ts';
+import { auditTeam } from './audit-team.ts';
 import { toFight } from './model.ts';
 
 export { toFight } from './model.ts';
+export type { TeamModel } from './model.ts';
+export { auditTeam } from './audit-team.ts';
 
 /** A team as one of its people sees it. */
 export interface TeamPlace {
@@ -80,7 +84,12 @@ export async function getSession(
   });
   const roles = new Map(memberships.map(({ teamId, role }) => [teamId, role]));
   return {
-    user: { id: user.id, name: user.name, email: user.email },
+    user: {
+      id: user.id,
+      name: user.name,
+      email: user.email,
+      ...((await isAdministrator(database, user.id)) ? { isAdministrator: true as const } : {}),
+    },
     teams: teams.flatMap(({ id, slug, name, university }) => {
       const role = roles.get(id);
       return role ? [{ slug, name, university, role }] : [];
@@ -140,7 +149,7 @@ export async function changeRole(
   place: TeamPlace,
   change: { readonly by: string; readonly person: string; readonly role: Role },
 ): Promise<Person> {
-  const { memberships, auditEvents } = deps.database.models;
+  const { memberships } = deps.database.models;
   const person = await deps.database.write(async (transaction) => {
     const people = await listPeople(deps.database, place.team.id, transaction);
     const found = people.find(({ id }) => id === change.person);
@@ -155,19 +164,17 @@ export async function changeRole(
     }
     const where = { teamId: place.team.id, userId: found.id };
     await memberships.update({ role: change.role }, { where, transaction });
-    await auditEvents.create(
+    await auditTeam(
+      deps.database,
       {
         teamId: place.team.id,
-        problemId: null,
-        version: null,
-        mutationId: null,
-        userId: change.by,
-        at: deps.now().toISOString(),
+        by: change.by,
+        now: deps.now(),
         action: 'change role',
-        before: JSON.stringify([{ table: 'memberships', id: found.id, role: found.role }]),
-        changes: JSON.stringify([{ table: 'memberships', id: found.id, role: change.role }]),
+        before: { table: 'memberships', id: found.id, role: found.role },
+        after: { table: 'memberships', id: found.id, role: change.role },
       },
-      { transaction },
+      transaction,
     );
     return { ...found, role: change.role };
   });

@@ -1,6 +1,6 @@
 import type { Transaction } from 'sequelize';
 import type { Database } from '#server/database/database.ts';
-import { hashCopyToken } from '#server/features/copies/service.ts';
+import { hashSecretToken } from '#server/tokens/secret-token.ts';
 
 /** Anybody may try the invented copy, so its token is no secret; it is offered beside the demonstration's sign-ins. */
 export const DEMO_COPY_TOKEN = 'leaning-spout-as-lent-to-gannet-bank-by-tern-rock';
@@ -28,7 +28,7 @@ export async function seedCopy(
       problemId: 'demo-problem-1',
       editionId: edition.id,
       number: 1,
-      tokenHash: hashCopyToken(DEMO_COPY_TOKEN),
+      tokenHash: hashSecretToken(DEMO_COPY_TOKEN),
       recipient: 'Gannet Bank',
       recipientTeamId: 'demo-gannet-bank',
       reader: 'opponent',

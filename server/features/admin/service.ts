@@ -1,0 +1,1 @@
+export { createSetupLink } from './setup.ts';
