@@ -22,7 +22,10 @@ const problemScreens: RouteObject[] = [
 const signedInScreens: RouteObject[] = [
   {
     lazy: () => import('#src/app/frames/account-frame.tsx'),
-    children: [{ path: 'account', lazy: () => import('#src/features/session/routes/account-screen.tsx') }],
+    children: [
+      { path: 'account', lazy: () => import('#src/features/session/routes/account-screen.tsx') },
+      { path: 'admin', lazy: () => import('#src/features/admin/routes/admin-screen.tsx') },
+    ],
   },
   {
     path: 'team/:team',
@@ -33,6 +36,7 @@ const signedInScreens: RouteObject[] = [
         children: [
           { index: true, lazy: () => import('#src/features/season/routes/season-screen.tsx') },
           { path: 'fights', lazy: () => import('#src/app/screens/fights-screen.tsx') },
+          { path: 'people', lazy: () => import('#src/app/screens/people-screen.tsx') },
           { path: 'copies', lazy: () => import('#src/app/screens/copies-screen.tsx') },
           {
             path: 'new-problem',
@@ -64,6 +68,10 @@ export const routes: RouteObject[] = [
         errorElement: <ErrorScreen />,
         children: [
           { index: true, lazy: () => import('#src/features/session/routes/sign-in-screen.tsx') },
+          { path: 'forgotten', lazy: () => import('#src/features/entry/routes/forgotten-screen.tsx') },
+          { path: 'reset/:token', lazy: () => import('#src/features/entry/routes/reset-screen.tsx') },
+          { path: 'join/:token', lazy: () => import('#src/features/entry/routes/join-screen.tsx') },
+          { path: 'setup/:token', lazy: () => import('#src/features/entry/routes/setup-screen.tsx') },
           { path: 'copy/:token', lazy: () => import('#src/app/screens/copy-screen.tsx') },
           { lazy: () => import('#src/app/frames/signed-in-frame.tsx'), children: signedInScreens },
           { path: '*', element: <NotFoundScreen /> },

@@ -11,10 +11,13 @@ function problem({ team, number }: ProblemAddress): string {
 /** Links are built here and nowhere else. */
 export const paths = {
   signIn: (to?: string) => (to === undefined ? '/' : `/?to=${encodeURIComponent(to)}`),
+  forgotten: () => '/forgotten',
   account: () => '/account',
+  admin: () => '/admin',
   season: (team: string) => `/team/${encodeURIComponent(team)}`,
   fights: (team: string) => `/team/${encodeURIComponent(team)}/fights`,
   copies: (team: string) => `/team/${encodeURIComponent(team)}/copies`,
+  people: (team: string) => `/team/${encodeURIComponent(team)}/people`,
   newProblem: (team: string) => `/team/${encodeURIComponent(team)}/new-problem`,
   /** Goes on to the station last used. */
   problem,

@@ -5,6 +5,11 @@ import type { ProblemAddress } from './problem/problem-address.ts';
 export const queryKeys = {
   session: ['session'] as const,
   health: ['health'] as const,
+  /** What the link of a mail, or of the first start, opens. */
+  link: (kind: 'invitation' | 'setup', token: string) => ['link', kind, token] as const,
+  /** Of who looks after the installation; without a name, all of it. */
+  admin: (what?: 'teams' | 'people') =>
+    what === undefined ? (['admin'] as const) : (['admin', what] as const),
   team: (team: string) => ['team', team] as const,
   problems: (team: string) => ['team', team, 'problems'] as const,
   problem: ({ team, number }: ProblemAddress) => ['team', team, 'problem', number] as const,

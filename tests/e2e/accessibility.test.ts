@@ -25,6 +25,7 @@ const SCREENS = [
   ['Editions, none yet', '/team/tern-rock/problem/12/editions'],
   ['Settings', `${P}/settings`],
   ['Copies', '/team/tern-rock/copies'],
+  ['People', '/team/tern-rock/people'],
   ['New problem', '/team/tern-rock/new-problem'],
   ['Account', '/account'],
   ['An address that leads nowhere', '/team/tern-rock/problem/77/report'],
@@ -100,6 +101,15 @@ describe.each(['light', 'dark'] as const)('in %s', (theme) => {
       await page.getByLabel('Your note').waitFor();
     };
     expect(await findings(page, `${P}/report`, theme, write)).toEqual([]);
+    await context.close();
+  });
+
+  test.each([1440, 390])('Ways in and links that open nothing, signed out, %i px wide', async (width) => {
+    const context = await browser.newContext({ viewport: { width, height: 844 } });
+    const page = await context.newPage();
+    for (const path of ['/forgotten', '/reset/none', '/join/none', '/setup/none']) {
+      expect(await findings(page, path, theme)).toEqual([]);
+    }
     await context.close();
   });
 

@@ -35,7 +35,9 @@ afterEach(async () => {
 
 const deliver = () => app.server.deps.mail.wake();
 const later = (minutes: number) => app.setNow(new Date(FIRST_START.getTime() + minutes * MINUTE));
-const outbox = async () => (await ines.get(`${TEAM}/outbox`)).body;
+/** The team's mail but for what came with the demonstration. */
+const outbox = async () =>
+  (await ines.get(`${TEAM}/outbox`)).body.filter(({ id }: { id: string }) => !id.startsWith('demo-'));
 
 describe('mail by SMTP', () => {
   test('invitation, when the mail server takes it: arrives with its link, and is told to the captain without', async () => {
@@ -51,8 +53,8 @@ describe('mail by SMTP', () => {
     expect(entry).toMatchObject({ state: 'sent', kind: 'invitation', mayRetry: false, error: null });
     expect(entry.text).toContain('[the link]');
     expect(JSON.stringify(entry)).not.toContain('/join/');
-    const rows = await app.server.deps.database.models.outbox.findAll({ raw: true });
-    expect(rows.map(({ link }) => link)).toEqual([null]);
+    const row = await app.server.deps.database.models.outbox.findByPk(entry.id, { raw: true });
+    expect(row?.link).toBeNull();
   });
 
   test('invitation, when the mail server is down: is made all the same, and the mail is tried until it is taken', async () => {

@@ -21,6 +21,8 @@ export function TeamTopLine() {
   const isSeason = pathname === season;
   const copies = paths.copies(team.slug);
   const isCopies = pathname === copies;
+  const people = paths.people(team.slug);
+  const isPeople = pathname === people;
   const { data: lent } = useQuery({ ...teamCopiesQuery(team.slug), enabled: isCopies });
   useDigitKeys([], season);
   return (
@@ -41,6 +43,12 @@ export function TeamTopLine() {
           words: 'Copies',
           isHere: isCopies,
           cup: isCopies && lent ? outCount(lent.lent) : null,
+        },
+        {
+          to: people,
+          words: 'People',
+          isHere: isPeople,
+          cup: isPeople ? countOf(team.people.length, 'person', 'people') : null,
         },
       ]}
       others={[{ to: paths.account(), words: `${user.name}, your account` }]}

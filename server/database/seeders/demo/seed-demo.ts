@@ -12,6 +12,7 @@ import { seedNotes } from './seed-notes.ts';
 import { DEMO_PROBLEMS, DEMO_SETTINGS } from './problems.ts';
 import type { DemoProblem } from './problems.ts';
 import { seedCopy } from './seed-copy.ts';
+import { seedPeople } from './seed-people.ts';
 import { seedEditions } from './seed-editions.ts';
 
 const TEAMS = [
@@ -31,6 +32,7 @@ export async function seedDemo(database: Database, firstStart: Date): Promise<vo
     await insertPeople(database, hashes, firstStart, transaction);
     await insertTeams(database, firstStart, transaction);
     for (const problem of DEMO_PROBLEMS) await insertProblem(database, problem, firstStart, transaction);
+    await seedPeople(database, firstStart, transaction);
     await seedCopy(database, firstStart, transaction);
   });
 }

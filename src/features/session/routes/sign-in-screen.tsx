@@ -2,7 +2,9 @@ import { useQuery } from '@tanstack/react-query';
 import { Navigate, useSearchParams } from 'react-router-dom';
 import { Mark } from '#src/components/mark.tsx';
 import { Notice } from '#src/components/notice.tsx';
+import { WordLink } from '#src/components/word.tsx';
 import { sentenceOf } from '#src/lib/api/api-error.ts';
+import { paths } from '#src/lib/paths.ts';
 import { sessionQuery } from '#src/lib/session/use-session.ts';
 import { useTitle } from '#src/lib/use-title.ts';
 import { afterSignIn } from '../components/after-sign-in.ts';
@@ -48,18 +50,21 @@ export function Component() {
             Log the trials, write the model, face the difference, and stand up to the opponent.
           </p>
         </div>
-        <div className="max-w-[460px] px-5 pt-9 pb-6 sm:px-14 lg:absolute lg:top-[216px] lg:right-[4.58%] lg:w-[352px] lg:p-0">
+        <div className="max-w-[460px] px-5 pt-9 pb-6 sm:px-14 lg:absolute lg:top-[176px] lg:right-[4.58%] lg:w-[352px] lg:p-0">
           <h2 className="mb-4.5 font-report text-xl font-medium">Sign in</h2>
           {error && <Notice title={sentenceOf(error)} className="mb-4" />}
           {/* The session is set on success, and this screen goes on by itself. */}
           <CredentialsForm onSignedIn={() => undefined} />
-          <div className="mt-4.5 border-t border-rule pt-4 empty:hidden">
+          <div className="mt-4.5 border-t border-rule pt-4">
+            <p className="mb-2 text-sm">
+              <WordLink to={paths.forgotten()}>Forgotten passphrase?</WordLink>
+            </p>
             <DemoSignIns onSignedIn={() => undefined} />
             <DemoCopy />
           </div>
         </div>
         <p className="px-5 pb-8 text-xs/[19px] text-ink-3 sm:px-14 lg:absolute lg:top-[744px] lg:right-14 lg:w-[362px] lg:p-0">
-          Teams are opened by a faculty advisor. Ask yours for an invitation.
+          A team’s captain invites its people by mail. Ask yours for an invitation.
         </p>
         <SpoutFigure viewBox="0 250 960 510" className="w-full overflow-visible pb-6 lg:hidden" />
       </div>
