@@ -147,9 +147,9 @@ describe('margin notes', () => {
     await inside.getByText('Two centimetres, at 55°.').waitFor();
     await kasimir.reload();
     await inside.waitFor();
-    expect(await kasimir.locator('.report-text').locator('p', { hasText: 'Two centimetres' }).count()).toBe(
-      1,
-    );
+    await expect
+      .poll(() => kasimir.locator('.report-text').locator('p', { hasText: 'Two centimetres' }).count())
+      .toBe(1);
     await close(kasimir);
   });
 });
